@@ -32,7 +32,6 @@ export const REMARK_CODES = [
   'referenceMasked',
   'buildMasked',
   'clearsAverageLine',
-  'gainUnderGuard',
 ] as const;
 
 export type RemarkCode = (typeof REMARK_CODES)[number];
