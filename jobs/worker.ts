@@ -1,0 +1,61 @@
+import type { Context } from '../server/context';
+import { claimRun } from '../server/queue/claim-run';
+import { HeldRun, RunLostError } from '../server/queue/held-run';
+import { beat, BEAT_EVERY_MS } from '../server/queue/worker-beat';
+import type { Job } from './job';
+
+/** How soon after it was asked for a run begins. */
+const POLL_MS = 400;
+
+/** Takes the next waiting run, works it and records how it ended. Returns whether there was one. */
+export async function workOnce(context: Context, worker: string, jobs: readonly Job[]): Promise<boolean> {
+  const run = claimRun(
+    context,
+    worker,
+    jobs.map((job) => job.name),
+  );
+  const job = jobs.find(({ name }) => name === run?.job);
+  if (run === undefined || job === undefined) return false;
+  const held = new HeldRun(context, run, worker);
+  const log = context.log.child({ job: run.job, run: run.id });
+  try {
+    await job.run(context, held);
+    held.finish();
+    log.info('run finished');
+  } catch (error) {
+    log.error({ err: error }, 'run failed');
+    if (!(error instanceof RunLostError)) held.fail(error);
+  }
+  return true;
+}
+
+/** Works until `signal` aborts; a run in hand is finished first. */
+export async function startWorker(
+  context: Context,
+  worker: string,
+  jobs: readonly Job[],
+  signal: AbortSignal,
+): Promise<void> {
+  const startedAt = context.now();
+  beat(context, worker, startedAt);
+  const pulse = setInterval(() => beat(context, worker, startedAt), BEAT_EVERY_MS);
+  while (!signal.aborted) {
+    const hasWorked = await workOnce(context, worker, jobs);
+    if (!hasWorked) await pause(POLL_MS, signal);
+  }
+  clearInterval(pulse);
+}
+
+function pause(durationMs: number, signal: AbortSignal): Promise<void> {
+  return new Promise((resolve) => {
+    const timer = setTimeout(resolve, durationMs);
+    signal.addEventListener(
+      'abort',
+      () => {
+        clearTimeout(timer);
+        resolve();
+      },
+      { once: true },
+    );
+  });
+}

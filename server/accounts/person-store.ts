@@ -1,0 +1,30 @@
+import type { Role } from '@shared/access/roles';
+import { and, eq } from 'drizzle-orm';
+import type { Database } from '../db/open-database';
+import { memberships, people, teams } from '../db/schema';
+
+export type Person = typeof people.$inferSelect;
+
+export function findPersonById(db: Database, id: number): Person | undefined {
+  return db.select().from(people).where(eq(people.id, id)).get();
+}
+
+/** @param email in lower case */
+export function findPersonByEmail(db: Database, email: string): Person | undefined {
+  return db.select().from(people).where(eq(people.email, email)).get();
+}
+
+export function insertPerson(db: Database, person: typeof people.$inferInsert): Person {
+  return db.insert(people).values(person).returning().get();
+}
+
+/** Roles of a person by team id, archived teams left out. */
+export function rolesOf(db: Database, personId: number): Map<number, Role> {
+  const rows = db
+    .select({ teamId: memberships.teamId, role: memberships.role })
+    .from(memberships)
+    .innerJoin(teams, eq(teams.id, memberships.teamId))
+    .where(and(eq(memberships.personId, personId), eq(teams.isArchived, false)))
+    .all();
+  return new Map(rows.map((row) => [row.teamId, row.role]));
+}

@@ -1,0 +1,131 @@
+import compression from 'compression';
+import express, { type Express } from 'express';
+import session from 'express-session';
+import helmet from 'helmet';
+import { existsSync } from 'node:fs';
+import { resolve } from 'node:path';
+import passport from 'passport';
+import { pinoHttp } from 'pino-http';
+import { accountRoutes } from './accounts/account-routes';
+import { identify } from './accounts/identify';
+import { auditRoutes } from './audit/audit-routes';
+import { benchRoutes } from './benches/bench-routes';
+import { buildRoutes } from './builds/build-routes';
+import type { Context } from './context';
+import { digestRoutes } from './digests/digest-routes';
+import { dropRoutes } from './drops/drop-routes';
+import { guardCrossSite } from './http/cross-site';
+import { handleErrors } from './http/handle-errors';
+import { healthRoutes } from './http/health-routes';
+import { openapiRoutes } from './http/openapi-routes';
+import { SESSION_MS, SessionStore } from './http/session-store';
+import { judgingRoutes } from './judging/judging-routes';
+import { limitRoutes } from './limits/limit-routes';
+import { mailboxRoutes } from './mail/mailbox-routes';
+import { marginRoutes } from './margins/margin-routes';
+import { productRoutes } from './products/product-routes';
+import { ServiceError } from './service-error';
+import { importRoutes } from './sweeps/import-routes';
+import { sweepRoutes } from './sweeps/sweep-routes';
+import { installationRoutes } from './teams/installation-routes';
+import { teamRoutes } from './teams/team-routes';
+import { tokenRoutes } from './tokens/token-routes';
+
+/** Every feature's routes, below /api. */
+const FEATURES = [
+  accountRoutes,
+  teamRoutes,
+  installationRoutes,
+  tokenRoutes,
+  auditRoutes,
+  benchRoutes,
+  sweepRoutes,
+  importRoutes,
+  productRoutes,
+  buildRoutes,
+  marginRoutes,
+  judgingRoutes,
+  dropRoutes,
+  limitRoutes,
+  digestRoutes,
+  mailboxRoutes,
+  openapiRoutes,
+];
+
+/** Builds the web application without listening. */
+export function createApp(context: Context): Express {
+  const app = express();
+  app.disable('x-powered-by');
+  app.set('trust proxy', context.config.trustedProxies);
+  app.use(pinoHttp({ logger: context.log, autoLogging: { ignore: (request) => !request.url?.startsWith('/api/') } }));
+  app.use(
+    helmet({
+      contentSecurityPolicy: { directives: contentPolicy() },
+      strictTransportSecurity: context.config.isProduction,
+    }),
+  );
+  app.use(
+    compression({
+      filter: (request, response) =>
+        isText(response.getHeader('content-type')) && compression.filter(request, response),
+    }),
+  );
+
+  app.use('/api', healthRoutes(context), express.json({ limit: '256kb' }));
+  app.use('/api', sessionOf(context), passport.session(), identify(context), guardCrossSite);
+  for (const routes of FEATURES) app.use('/api', routes(context));
+  app.use('/api', (request) => {
+    throw new ServiceError('notFound', `there is no ${request.method} ${request.originalUrl}`);
+  });
+
+  servePages(app);
+  app.use(handleErrors(context.log));
+  return app;
+}
+
+function sessionOf(context: Context): express.RequestHandler {
+  return session({
+    store: new SessionStore(context.db, context.now),
+    name: 'strandline',
+    secret: context.config.sessionSecret,
+    resave: false,
+    saveUninitialized: false,
+    rolling: true,
+    cookie: { httpOnly: true, sameSite: 'lax', secure: 'auto', maxAge: SESSION_MS },
+  });
+}
+
+/** No inline script anywhere; styles inline because Angular writes component styles into the page. */
+function contentPolicy(): Record<string, string[] | null> {
+  return {
+    'default-src': ["'self'"],
+    'script-src': ["'self'"],
+    'script-src-attr': ["'none'"],
+    'style-src': ["'self'", "'unsafe-inline'"],
+    'img-src': ["'self'", 'data:', 'blob:'],
+    'font-src': ["'self'"],
+    'connect-src': ["'self'"],
+    'frame-ancestors': ["'none'"],
+    'object-src': ["'none'"],
+    // Without TLS in front, as on a bench's own network, this would turn every address into one that does not answer.
+    'upgrade-insecure-requests': null,
+  };
+}
+
+/** Level traces do not shrink under gzip and cost a hundred times their reading. */
+function isText(contentType: unknown): boolean {
+  return contentType !== 'application/octet-stream';
+}
+
+function servePages(app: Express): void {
+  const client = resolve('dist/client');
+  const index = resolve(client, 'index.html');
+  app.use(express.static(client, { index: false, immutable: true, maxAge: '365d' }));
+  app.get('/{*path}', (_request, response, next) => {
+    if (!existsSync(index)) {
+      next(new ServiceError('notFound', 'the pages are not built yet: run npm run build'));
+      return;
+    }
+    response.set('cache-control', 'no-cache').sendFile(index);
+  });
+}

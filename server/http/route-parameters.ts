@@ -1,0 +1,23 @@
+import type { Request } from 'express';
+import { ServiceError } from '../service-error';
+
+/** A text parameter of the path. */
+export function pathText(request: Request, name: string): string {
+  const value = request.params[name];
+  if (typeof value !== 'string') throw new ServiceError('invalid', `${name}: is missing in the address`);
+  return value;
+}
+
+/** A row id in the path. @throws ServiceError `notFound` when it is no positive whole number */
+export function pathId(request: Request, name: string): number {
+  const text = pathText(request, name);
+  if (!/^[1-9]\d{0,14}$/.test(text))
+    throw new ServiceError('notFound', `${name}: there is none with the number "${text}"`);
+  return Number(text);
+}
+
+/** The `team` of the query, where given. */
+export function queryTeam(request: Request): string | undefined {
+  const team = request.query['team'];
+  return typeof team === 'string' && team !== '' ? team : undefined;
+}

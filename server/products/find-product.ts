@@ -1,0 +1,85 @@
+import { may } from '@shared/access/may';
+import type { Action } from '@shared/access/permissions';
+import type { Actor } from '../actor';
+import type { Context } from '../context';
+import { requirePermission } from '../require-permission';
+import { ServiceError } from '../service-error';
+import {
+  findProductById,
+  findReachableProducts,
+  type Product,
+  type ProductOfTeam,
+  shareTeamIds,
+} from './product-store';
+
+export interface FoundProduct extends ProductOfTeam {
+  /** Owned by another team and read through a share. */
+  readonly isShared: boolean;
+}
+
+/**
+ * The product with this key, if the actor may do the action with it. Reading results also works for a product shared
+ * with one of the actor's teams; everything else only in the owning team.
+ *
+ * @param ownerKey key of the owning team, needed only when several reachable products have the key
+ * @throws ServiceError `notFound` for an unknown or foreign product alike; `forbidden`; `invalid` when the key is ambiguous
+ */
+export function findProduct(
+  context: Context,
+  actor: Actor,
+  key: string,
+  ownerKey: string | undefined,
+  action: Action,
+): FoundProduct {
+  const reachable = findReachableProducts(context.db, key, teamsOf(actor));
+  const named = ownerKey === undefined ? reachable : reachable.filter(({ team }) => team.key === ownerKey);
+  const own = named.filter(({ team }) => teamsOf(actor).includes(team.id));
+  const candidates = own.length > 0 ? own : named;
+  const [found, second] = candidates;
+  if (found === undefined) {
+    const where = ownerKey === undefined ? '' : ` in team "${ownerKey}"`;
+    throw new ServiceError('notFound', `there is no product "${key}"${where} for you`);
+  }
+  if (second !== undefined) {
+    const names = candidates.map(({ team }) => team.key).join(', ');
+    throw new ServiceError('invalid', `several teams have a product "${key}" (${names}): name one with team=`);
+  }
+  return { ...found, isShared: requireProduct(context, actor, found.product, action) };
+}
+
+/**
+ * Stops an actor who may not do the action with the product, whatever way it was found.
+ *
+ * @returns whether the product is read through a share
+ */
+export function requireProduct(context: Context, actor: Actor, product: Product, action: Action): boolean {
+  if (may(actor, action, product.teamId)) return false;
+  if (action === 'results.read' && isReadThroughShare(context, actor, product)) return true;
+  if (action !== 'results.read' && isReadThroughShare(context, actor, product)) {
+    throw new ServiceError('forbidden', `the product "${product.key}" is shared with your team to read only`);
+  }
+  requirePermission(actor, action, product.teamId);
+  return false;
+}
+
+/** The product with this row id, which must exist. */
+export function productById(context: Context, id: number): Product {
+  const product = findProductById(context.db, id);
+  if (product === undefined) throw new Error(`product ${id} is gone`);
+  return product;
+}
+
+function isReadThroughShare(context: Context, actor: Actor, product: Product): boolean {
+  return shareTeamIds(context.db, product.id).some((teamId) => may(actor, 'results.read', teamId));
+}
+
+function teamsOf(actor: Actor): number[] {
+  switch (actor.kind) {
+    case 'person':
+      return [...actor.roles.keys()];
+    case 'token':
+      return [actor.teamId];
+    case 'job':
+      return [];
+  }
+}

@@ -1,0 +1,45 @@
+import { createHash, randomUUID } from 'node:crypto';
+import { existsSync, mkdirSync, readFileSync, renameSync, writeFileSync } from 'node:fs';
+import { dirname, join } from 'node:path';
+import { gunzipSync, gzipSync } from 'node:zlib';
+
+/** SHA-256 of bytes, hexadecimal. */
+export function sha256(bytes: Uint8Array): string {
+  return createHash('sha256').update(bytes).digest('hex');
+}
+
+/**
+ * The instrument files as they came, byte for byte, named by their SHA-256 and gzipped on disk.
+ * A file is complete or absent: it is written beside its place and renamed. Files that no sweep names are harmless
+ * and swept away by the prune job.
+ */
+export class OriginalFiles {
+  constructor(private readonly folder: string) {}
+
+  /** Keeps the bytes; the same bytes twice are one file. Returns their SHA-256. */
+  keep(bytes: Uint8Array): string {
+    const hash = sha256(bytes);
+    const path = this.pathOf(hash);
+    if (existsSync(path)) return hash;
+    mkdirSync(dirname(path), { recursive: true });
+    const beside = `${path}.${randomUUID()}.part`;
+    // Level 1: three quarters of the best saving at a third of its time.
+    writeFileSync(beside, gzipSync(bytes, { level: 1 }));
+    renameSync(beside, path);
+    return hash;
+  }
+
+  /**
+   * @throws Error when the file is gone or no longer has the bytes its name promises
+   */
+  read(hash: string): Buffer {
+    const bytes = gunzipSync(readFileSync(this.pathOf(hash)));
+    if (sha256(bytes) !== hash) throw new Error(`the original ${hash} has changed on disk`);
+    return bytes;
+  }
+
+  /** Absolute path of the file with this SHA-256. */
+  pathOf(hash: string): string {
+    return join(this.folder, hash.slice(0, 2), `${hash}.gz`);
+  }
+}

@@ -1,0 +1,17 @@
+import * as z from 'zod';
+
+/** GET /api/teams/:team/audit?before=<id>&limit=100 (leads), GET /api/installation/audit (administrators) */
+export const AuditEntryView = z.object({
+  id: z.int(),
+  at: z.string(),
+  actor: z.string(),
+  actorKind: z.enum(['person', 'token', 'job']),
+  action: z.string(),
+  subjectKind: z.string(),
+  subjectId: z.string(),
+  summary: z.string(),
+  details: z.record(z.string(), z.unknown()),
+});
+export type AuditEntryView = z.infer<typeof AuditEntryView>;
+export const AuditPage = z.object({ entries: z.array(AuditEntryView), nextBefore: z.int().nullable() });
+export type AuditPage = z.infer<typeof AuditPage>;

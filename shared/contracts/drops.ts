@@ -1,0 +1,95 @@
+import type { BandJudgement } from '@shared/judging/band-judgement';
+import * as z from 'zod';
+import { Remark } from './sweeps';
+import { SwitchingStage } from './switching';
+
+export const DROP_STATES = ['new', 'checking', 'causeKnown', 'fixed', 'accepted', 'withdrawn'] as const;
+export type DropState = (typeof DROP_STATES)[number];
+/** States in which somebody still has to act. */
+export const OPEN_DROP_STATES = ['new', 'checking', 'causeKnown'] as const satisfies readonly DropState[];
+export const DROP_STATE_WORDS: Record<DropState, string> = {
+  new: 'new',
+  checking: 'being checked',
+  causeKnown: 'cause known',
+  fixed: 'fixed',
+  accepted: 'accepted',
+  withdrawn: 'withdrawn',
+};
+export const DROP_EVENT_KINDS = ['raised', 'moved', 'owner', 'note', 'evidence', 'withdrawn'] as const;
+
+/** One series that lost. */
+export interface DropWitness {
+  line: string;
+  detector: string;
+  judgement: BandJudgement;
+}
+
+/** What a drop was judged on, frozen. */
+export interface DropEvidence {
+  methodVersion: number;
+  limitSetKey: string;
+  limitSetVersion: number;
+  thresholdDb: number;
+  targetMarginDb: number;
+  referenceKind: 'chosen' | 'pooled';
+  referenceBuilds: { id: number; hardware: string; firmware: string }[];
+  previousBuild: { id: number; hardware: string; firmware: string } | null;
+  buildSweepIds: number[];
+  referenceSweepIds: number[];
+  witnesses: DropWitness[];
+  /** Set-up of both sides, row by row. */
+  setUp: { what: string; build: string; reference: string; isDifferent: boolean }[];
+  /** Declared differences between the builds: switching frequencies, revisions, parameters. */
+  changes: { what: string; before: string; now: string }[];
+  harmonic: { stage: string; order: number; expectedHz: number } | null;
+}
+
+/** Row of GET /api/v1/products/:key/drops?state and GET /api/teams/:team/drops?state&owner */
+export const DropSummary = z
+  .object({
+    id: z.int(),
+    product: z.string(),
+    productName: z.string(),
+    team: z.string(),
+    buildId: z.int(),
+    hardware: z.string(),
+    firmware: z.string(),
+    operatingState: z.string(),
+    band: z.string(),
+    state: z.enum(DROP_STATES),
+    owner: z.object({ id: z.int(), name: z.string() }).nullable(),
+    differenceDb: z.number(),
+    marginDb: z.number(),
+    frequencyHz: z.number(),
+    isOverLimit: z.boolean(),
+    witnesses: z.array(z.object({ line: z.string(), detector: z.string() })),
+    sentence: z.string(),
+    createdAt: z.string(),
+    updatedAt: z.string(),
+  })
+  .meta({ id: 'DropSummary' });
+export type DropSummary = z.infer<typeof DropSummary>;
+
+/** GET /api/v1/drops/:id */
+export const DropView = DropSummary.extend({
+  evidence: z.custom<DropEvidence>(),
+  buildSwitching: z.array(SwitchingStage),
+  remarks: z.array(Remark),
+  fixedBy: z.object({ id: z.int(), hardware: z.string(), firmware: z.string() }).nullable(),
+  history: z.array(z.object({ at: z.string(), actor: z.string(), kind: z.enum(DROP_EVENT_KINDS), text: z.string() })),
+  /** States this caller may move the drop to. */
+  moves: z.array(z.enum(DROP_STATES)),
+  assignable: z.array(z.object({ id: z.int(), name: z.string() })),
+});
+export type DropView = z.infer<typeof DropView>;
+
+/** POST /api/v1/drops/:id/moves; `fixed` must name the build that shows it, `accepted` a reason in `note`. */
+export const DropMove = z.object({
+  state: z.enum(['checking', 'causeKnown', 'fixed', 'accepted']),
+  note: z.string().trim().max(4000).default(''),
+  fixedByBuildId: z.int().optional(),
+});
+/** PUT /api/v1/drops/:id/owner */
+export const DropOwner = z.object({ personId: z.int().nullable() });
+/** POST /api/v1/drops/:id/notes */
+export const DropNote = z.object({ text: z.string().trim().min(1, 'must not be empty').max(4000) });

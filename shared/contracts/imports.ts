@@ -1,0 +1,80 @@
+import * as z from 'zod';
+import { JobRunView } from './job-runs';
+import { Problem } from './problem';
+import { Remark, SweepTags } from './sweeps';
+
+/** POST /api/teams/:team/readings (multipart `file`, optional `options`): what a file holds, nothing stored. */
+export const ReadingView = z.object({
+  fileName: z.string(),
+  sha256: z.string(),
+  pointCount: z.int(),
+  startHz: z.number(),
+  stopHz: z.number(),
+  medianStepHz: z.number(),
+  frequencyUnit: z.string(),
+  delimiter: z.string(),
+  decimalMark: z.string(),
+  rbwHz: z.number().nullable(),
+  traces: z.array(
+    z.object({
+      trace: z.int(),
+      name: z.string(),
+      levelUnit: z.string(),
+      detector: z.string().nullable(),
+      line: z.string().nullable(),
+      highestDbuv: z.number(),
+    }),
+  ),
+  inferred: z.array(z.object({ what: z.string(), value: z.string(), why: z.string() })),
+  remarks: z.array(Remark),
+});
+export type ReadingView = z.infer<typeof ReadingView>;
+
+/** Tags common to a batch and those of one trace laid over them; together they must make complete `SweepTags`. */
+export const BatchTags = SweepTags.partial();
+export type BatchTags = z.infer<typeof BatchTags>;
+export const BatchItemTags = SweepTags.partial();
+export type BatchItemTags = z.infer<typeof BatchItemTags>;
+
+/**
+ * POST /api/teams/:team/imports, multipart: `files` (many) and `plan` (JSON). Every item names a file by its place in
+ * `files`. Answers 202 with the batch; the jobs process imports it item by item.
+ */
+export const ImportPlan = z.object({
+  tags: BatchTags,
+  items: z
+    .array(z.object({ file: z.int().min(0), tags: BatchItemTags }))
+    .min(1, 'choose at least one trace')
+    .max(2000),
+});
+export type ImportPlan = z.infer<typeof ImportPlan>;
+
+/** GET /api/teams/:team/imports/:id; GET /api/teams/:team/imports lists the last 20 without items */
+export const ImportBatchView = z.object({
+  id: z.int(),
+  createdAt: z.string(),
+  createdBy: z.string(),
+  finishedAt: z.string().nullable(),
+  total: z.int(),
+  imported: z.int(),
+  duplicate: z.int(),
+  refused: z.int(),
+  waiting: z.int(),
+  run: JobRunView.nullable(),
+  items: z.array(
+    z.object({
+      id: z.int(),
+      fileName: z.string(),
+      tags: BatchItemTags,
+      status: z.enum(['waiting', 'imported', 'duplicate', 'refused']),
+      sweepId: z.int().nullable(),
+      productKey: z.string().nullable(),
+      buildId: z.int().nullable(),
+      worstMarginDb: z.number().nullable(),
+      problem: Problem.nullable(),
+    }),
+  ),
+});
+export type ImportBatchView = z.infer<typeof ImportBatchView>;
+/** GET /api/teams/:team/last-tags: the tags of the caller's last sweep in the team, for "same as last time". */
+export const LastTags = BatchTags.nullable();

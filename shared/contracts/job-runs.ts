@@ -1,0 +1,26 @@
+import * as z from 'zod';
+
+export const JOB_NAMES = ['judge', 'import', 'digest', 'mail', 'prune'] as const;
+export type JobName = (typeof JOB_NAMES)[number];
+export const JOB_STATUSES = ['waiting', 'running', 'done', 'failed'] as const;
+export const JOB_TRIGGERS = ['schedule', 'start', 'person', 'token', 'import'] as const;
+
+/** GET /api/teams/:team/jobs (newest first), GET /api/v1/runs/:id */
+export const JobRunView = z
+  .object({
+    id: z.int(),
+    job: z.enum(JOB_NAMES),
+    trigger: z.enum(JOB_TRIGGERS),
+    requestedBy: z.string(),
+    status: z.enum(JOB_STATUSES),
+    queuedAt: z.string(),
+    startedAt: z.string().nullable(),
+    finishedAt: z.string().nullable(),
+    attempts: z.int(),
+    total: z.int(),
+    done: z.int(),
+    counts: z.record(z.string(), z.number()),
+    errors: z.array(z.object({ subject: z.string(), message: z.string() })),
+  })
+  .meta({ id: 'JobRun' });
+export type JobRunView = z.infer<typeof JobRunView>;

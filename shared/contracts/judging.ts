@@ -1,0 +1,54 @@
+import type { BandJudgement } from '@shared/judging/band-judgement';
+import * as z from 'zod';
+import { DetectorName, Line, VerdictName } from './primitives';
+
+/** GET /api/v1/products/:key/verdicts?hardware&firmware */
+export const VerdictsView = z
+  .object({
+    product: z.string(),
+    buildId: z.int(),
+    hardware: z.string(),
+    firmware: z.string(),
+    verdict: VerdictName.nullable(),
+    isStale: z.boolean(),
+    judgedAt: z.string().nullable(),
+    methodVersion: z.int().nullable(),
+    referenceKind: z.enum(['chosen', 'pooled']).nullable(),
+    referenceBuilds: z.array(z.object({ id: z.int(), hardware: z.string(), firmware: z.string() })),
+    unmeasuredStates: z.array(z.string()),
+    verdicts: z.array(
+      z.object({
+        state: z.string(),
+        line: Line,
+        detector: DetectorName,
+        band: z.string(),
+        verdict: VerdictName,
+        isOverLimit: z.boolean(),
+        differenceDb: z.number().nullable(),
+        worstMarginDb: z.number().nullable(),
+        worstFrequencyHz: z.number().nullable(),
+        judgement: z.custom<BandJudgement>(),
+      }),
+    ),
+  })
+  .meta({ id: 'Verdicts' });
+export type VerdictsView = z.infer<typeof VerdictsView>;
+
+/** GET /api/v1/products/:key/gate?hardware&firmware&targetMarginDb&format */
+export const GateQuery = z.object({
+  hardware: z.string(),
+  firmware: z.string(),
+  targetMarginDb: z.coerce.number().min(0).max(40).optional(),
+  format: z.enum(['json', 'junit']).default('json'),
+});
+export const GateView = z
+  .object({
+    verdict: z.enum(['pass', 'fail', 'incomplete']),
+    product: z.string(),
+    hardware: z.string(),
+    firmware: z.string(),
+    targetMarginDb: z.number(),
+    reasons: z.array(z.object({ code: z.string(), text: z.string() })),
+  })
+  .meta({ id: 'Gate' });
+export type GateView = z.infer<typeof GateView>;
