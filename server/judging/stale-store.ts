@@ -1,0 +1,36 @@
+import { and, asc, eq, gt, gte, isNull, sql } from 'drizzle-orm';
+import type { Database } from '../db/open-database';
+import { builds, products, teams } from '../db/schema';
+
+/** Data of the build came in after the version it was judged at; a build without sweeps has nothing to judge. */
+const isStale = and(gt(builds.dataVersion, builds.judgedVersion), gt(builds.sweepCount, 0));
+
+/** Raises the data version of the product's measured builds at and after the position. */
+export function raiseDataVersions(db: Database, productId: number, fromPosition: number): void {
+  db.update(builds)
+    .set({ dataVersion: sql`${builds.dataVersion} + 1` })
+    .where(and(eq(builds.productId, productId), gte(builds.position, fromPosition), gt(builds.sweepCount, 0)))
+    .run();
+}
+
+/** Stale builds of a product, oldest first. */
+export function listStaleBuilds(db: Database, productId: number): { id: number; position: number }[] {
+  return db
+    .select({ id: builds.id, position: builds.position })
+    .from(builds)
+    .where(and(eq(builds.productId, productId), isStale))
+    .orderBy(asc(builds.position))
+    .all();
+}
+
+/** Products in use that have a stale build. */
+export function listStaleProducts(db: Database): { id: number; teamId: number }[] {
+  return db
+    .selectDistinct({ id: products.id, teamId: products.teamId })
+    .from(builds)
+    .innerJoin(products, eq(products.id, builds.productId))
+    .innerJoin(teams, eq(teams.id, products.teamId))
+    .where(and(isStale, isNull(products.archivedAt), eq(teams.isArchived, false)))
+    .orderBy(asc(products.id))
+    .all();
+}
