@@ -66,11 +66,6 @@ export function comparableSides(band: BandInput, limitLineKey: string): Comparis
   if (band.build.length === 0) {
     return { refused: [{ code: 'notMeasured', text: 'this build was not measured in this series and band' }] };
   }
-  if (band.reference.length === 0) {
-    return {
-      refused: [{ code: 'noReference', text: 'there is no earlier measurement of this series to compare with' }],
-    };
-  }
   const byTime = (sweeps: readonly RunMargin[]) => [...sweeps].sort((a, b) => a.takenAt - b.takenAt);
   const ownFault = (sweep: RunMargin) => refuseRun(sweep, limitLineKey);
   const earlierHashes = new Set([...band.reference, ...band.previous].map(({ readingHash }) => readingHash));
@@ -85,6 +80,11 @@ export function comparableSides(band: BandInput, limitLineKey: string): Comparis
     return { refused: [{ code: 'correctionDiffers', text }] };
   }
 
+  if (band.reference.length === 0) {
+    return {
+      refused: [{ code: 'noReference', text: 'there is no earlier measurement of this series to compare with' }],
+    };
+  }
   const soundReference = sort(byTime(band.reference), ownFault);
   const alike = sort(soundReference.kept, (sweep) =>
     sweep.correction === correction

@@ -57,6 +57,7 @@ export function decideVerdict(band: TestedBand): Decision {
   return { verdict: reasons.length > 0 ? 'cannotSay' : numbers, reasons };
 }
 
-function nameSide(side: string, { code, text }: Reason): Reason {
+/** Says which side a reason is about. */
+export function nameSide(side: 'this build' | 'the reference', { code, text }: Reason): Reason {
   return { code, text: `${side}: ${text}` };
 }

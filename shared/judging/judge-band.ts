@@ -1,8 +1,9 @@
 import type { BandJudgement, JudgedSpread, PointMove, Reason, Remark, WorstPoint } from './band-judgement';
 import type { BandInput, BuildInput, SeriesInput } from './build-input';
 import { compareSetUps } from './compare-set-ups';
-import { decideVerdict } from './decide-verdict';
+import { decideVerdict, nameSide } from './decide-verdict';
 import { maskOfSide } from './masked-point';
+import { hasMargin } from './refuse-run';
 import { remarkEvidence } from './remark-evidence';
 import type { RunMargin } from './run-margin';
 import { runsToSettle } from './runs-to-settle';
@@ -59,6 +60,8 @@ export function refuseBand(
 ): BandJudgement {
   const build = sideOrNull(band.build);
   const reference = sideOrNull(band.reference);
+  const mask = build && maskOfSide(build, input.targetMarginDb);
+  const allReasons = mask ? [...reasons, nameSide('this build', mask)] : reasons;
   return {
     ...identity(input, series, band),
     verdict: 'cannotSay',
@@ -78,9 +81,9 @@ export function refuseBand(
     referenceWorst: reference && worstPoint(reference),
     move: null,
     ...standing(build?.worst.marginDb ?? null, input),
-    reasons,
+    reasons: allReasons,
     remarks: [],
-    settles: settlesFor(reasons, null),
+    settles: settlesFor(allReasons, null),
     buildSweepIds: sweepIds(band.build),
     referenceSweepIds: sweepIds(band.reference),
   };
@@ -113,6 +116,7 @@ export function judgeBand(
   const adjustment = p > 0 ? pAdjusted / p : 1;
   const needed = runsToSettle({ ...test, thresholdDb, spread, buildRuns, referenceRuns, adjustment });
   const previous = sideOrNull(band.previous);
+  const standingSide = summariseSide(band.build.filter((sweep) => hasMargin(sweep, series.limitLineKey)));
   const evidence = { build, reference, buildMask, referenceMask, verdict, detector: series.detector };
   return {
     ...identity(input, series, band),
@@ -129,10 +133,10 @@ export function judgeBand(
     meanMarginDb: build.meanMarginDb,
     referenceMeanMarginDb: reference.meanMarginDb,
     previousDifferenceDb: previous && build.meanMarginDb - previous.meanMarginDb,
-    worst: worstPoint(build),
+    worst: worstPoint(standingSide),
     referenceWorst: worstPoint(reference),
     move: movedPoint(build, reference),
-    ...standing(build.worst.marginDb, input),
+    ...standing(standingSide.worst.marginDb, input),
     reasons,
     remarks: [...remarks, ...compareSetUps(build, reference), ...remarkEvidence(evidence)],
     settles: verdict === 'cannotSay' ? settlesFor(reasons, needed) : [],

@@ -24,3 +24,9 @@ export function refuseRun(sweep: RunMargin, limitLineKey: string): Reason | null
   }
   return null;
 }
+
+/** Whether a sweep's margin holds by itself: part of a band missing spoils the comparison, not a point over the limit. */
+export function hasMargin(sweep: RunMargin, limitLineKey: string): boolean {
+  const refusal = refuseRun(sweep, limitLineKey);
+  return refusal === null || refusal.code === 'bandNotCovered';
+}

@@ -5,7 +5,10 @@ declare module 'jstat' {
       cdf(t: number, degreesOfFreedom: number): number;
       inv(p: number, degreesOfFreedom: number): number;
     };
-    readonly normal: { cdf(x: number, mean: number, sd: number): number };
+    readonly normal: {
+      cdf(x: number, mean: number, sd: number): number;
+      inv(p: number, mean: number, sd: number): number;
+    };
   }
   const jStat: JStat;
   export default jStat;

@@ -34,7 +34,11 @@ export function aRun(overrides: Partial<RunMargin> = {}): RunMargin {
 }
 
 /** Runs of these margins; builds are numbered on from `firstBuildId`, one a run. */
-export function runsOf(marginsDb: readonly number[], firstBuildId = 1, overrides: Partial<RunMargin> = {}): RunMargin[] {
+export function runsOf(
+  marginsDb: readonly number[],
+  firstBuildId = 1,
+  overrides: Partial<RunMargin> = {},
+): RunMargin[] {
   return marginsDb.map((marginDb, index) => aRun({ marginDb, buildId: firstBuildId + index, ...overrides }));
 }
 
