@@ -53,8 +53,10 @@ export function checkFrequencies(frequenciesHz: Float64Array, dataLine: number, 
 
 /** Checks levels as a sweep's: believable, and not all the same. */
 export function checkLevels(levelsDbuv: Float32Array, dataLine: number, column: number): void {
-  const beyond = levelsDbuv.findIndex((level) => !(Math.abs(level) <= HIGHEST_LEVEL_DB));
-  if (beyond >= 0) {
+  const { length } = levelsDbuv;
+  let beyond = 0;
+  while (beyond < length && Math.abs(levelsDbuv[beyond]) <= HIGHEST_LEVEL_DB) beyond++;
+  if (beyond < length) {
     throw new ReadingError({
       line: dataLine + beyond,
       column,
@@ -67,7 +69,7 @@ export function checkLevels(levelsDbuv: Float32Array, dataLine: number, column: 
     throw new ReadingError({
       line: dataLine,
       column,
-      found: `the same level in all ${levelsDbuv.length} rows`,
+      found: `the same level in all ${length} rows`,
       expected: 'levels of a measured sweep',
       advice: 'The trace was blank or not yet swept when it was exported.',
     });

@@ -26,8 +26,9 @@ const NUMBER: Readonly<Record<DecimalMark, RegExp>> = {
 };
 /** The first cell of a row that was meant to hold numbers, even if it does not. */
 const MEANT_AS_NUMBER = /^(?:[+-]?[.,]?\d.*|[+-]?nan|[+-]?inf(?:inity)?|null|n\/?a|[-*#?]*)$/i;
-/** A preamble of 60 lines, twice over, and enough rows behind it to see which form they keep. */
-const LINES_LOOKED_AT = 160;
+/** Mostly a few lines show the form; else a preamble of 60 lines, twice over, and rows behind it. */
+const LINES_LOOKED_AT = [16, 160] as const;
+const ROWS_THAT_SUFFICE = 8;
 
 export function isNumberText(text: string, decimalMark: DecimalMark): boolean {
   return NUMBER[decimalMark].test(text);
@@ -49,8 +50,12 @@ interface FormCount {
  * @throws ReadingError when no line is a row of two or more numbers
  */
 export function findDelimitedLayout(bytes: Uint8Array, start: number): DelimitedLayout {
-  const lines = firstLines(bytes, start, LINES_LOOKED_AT);
-  const form = commonestForm(lines);
+  let lines = firstLines(bytes, start, LINES_LOOKED_AT[0]);
+  let form = commonestForm(lines);
+  if (form === null || form.rows < ROWS_THAT_SUFFICE) {
+    lines = firstLines(bytes, start, LINES_LOOKED_AT[1]);
+    form = commonestForm(lines);
+  }
   if (form === null) throw noTable(lines);
   const { delimiter, columnCount } = form;
   const first = firstDataLine(lines, form);
@@ -124,8 +129,8 @@ function noTable(lines: readonly TextLine[]): ReadingError {
     found: quote(suspect.text),
     expected: 'a row of two or more numbers, frequency first, separated by comma, semicolon or tab',
     advice:
-      lines.length === LINES_LOOKED_AT
-        ? `No such row is in the first ${LINES_LOOKED_AT} lines.`
+      lines.length === LINES_LOOKED_AT[1]
+        ? `No such row is in the first ${lines.length} lines.`
         : 'The file holds no such row.',
   });
 }

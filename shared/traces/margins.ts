@@ -63,7 +63,8 @@ export function prepareGrid(
   bands: readonly Band[],
   cellEdges: Float64Array,
 ): PreparedGrid {
-  const limitsDbuv = Float64Array.from(frequenciesHz, (frequencyHz) => limitAt(line, frequencyHz) ?? NaN);
+  const limitsDbuv = new Float64Array(frequenciesHz.length);
+  for (let i = 0; i < limitsDbuv.length; i++) limitsDbuv[i] = limitAt(line, frequenciesHz[i]) ?? NaN;
   const cells = Array.from(cellEdges.subarray(1), (toHz, i) => ({ fromHz: cellEdges[i], toHz }));
   const { runStarts, ranges } = placeRanges(frequenciesHz, [...bands, ...cells]);
   return {

@@ -30,7 +30,9 @@ const NO_LEVEL_NAME = /margin|limit|delta|over|factor|correction|transducer|(?<!
 
 /** The one column of frequencies: the first without a heading, else the one whose heading says so. */
 export function frequencyColumnOf({ columns, line }: TableHeading): number {
-  const named = columns.flatMap(({ name, unitText }, i) => (isFrequencyName(name || unitText) ? [i] : []));
+  const named = columns.flatMap(({ name, unitText }, i) =>
+    isFrequencyName(name || unitText) && levelUnitIn(unitText) === undefined ? [i] : [],
+  );
   if (named.length > 1) {
     throw new ReadingError({
       line,

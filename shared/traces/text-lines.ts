@@ -10,19 +10,19 @@ export interface TextLine {
 const LINE_FEED = 10;
 const CARRIAGE_RETURN = 13;
 
+/** A longer line is cut: it is no row of a sweep, and a message quotes far less. */
+const LONGEST_LINE = 8192;
+
 /**
  * Decodes a stretch of bytes as UTF-8, or as Latin-1 where it is not valid UTF-8: older instruments write the micro sign so.
  * Meant for single lines; a whole sweep is never turned into text.
  */
 export function decodeText(bytes: Uint8Array, start: number, end: number): string {
-  let text = '';
-  let escaped = '';
-  for (let i = start; i < end; i++) {
-    text += String.fromCharCode(bytes[i]);
-    escaped += `%${bytes[i].toString(16).padStart(2, '0')}`;
-  }
+  const part = bytes.subarray(start, Math.min(end, start + LONGEST_LINE));
+  const text = String.fromCharCode(...part);
+  if (part.every((byte) => byte < 128)) return text;
   try {
-    return decodeURIComponent(escaped);
+    return decodeURIComponent(Array.from(part, (byte) => `%${byte.toString(16).padStart(2, '0')}`).join(''));
   } catch {
     return text;
   }
