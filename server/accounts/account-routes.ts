@@ -1,7 +1,8 @@
 import { Router } from 'express';
 import type { Context } from '../context';
+import { sessionRoutes } from './session-routes';
 
 /** Sign-in, sign-out, invitation, password. */
-export function accountRoutes(_context: Context): Router {
-  return Router();
+export function accountRoutes(context: Context): Router {
+  return Router().use(sessionRoutes(context));
 }

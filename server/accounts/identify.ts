@@ -1,6 +1,7 @@
 import type { RequestHandler } from 'express';
 import type { Context } from '../context';
 import { setActor } from '../http/actor-of';
+import type {} from '../http/session-user';
 import { authenticateToken } from '../tokens/authenticate-token';
 import { personActor } from './person-actor';
 

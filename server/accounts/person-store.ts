@@ -1,5 +1,5 @@
 import type { Role } from '@shared/access/roles';
-import { and, eq } from 'drizzle-orm';
+import { and, asc, eq } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
 import { memberships, people, teams } from '../db/schema';
 
@@ -27,4 +27,19 @@ export function rolesOf(db: Database, personId: number): Map<number, Role> {
     .where(and(eq(memberships.personId, personId), eq(teams.isArchived, false)))
     .all();
   return new Map(rows.map((row) => [row.teamId, row.role]));
+}
+
+export function listPersonRows(db: Database): Person[] {
+  return db.select().from(people).orderBy(asc(people.name), asc(people.id)).all();
+}
+
+/** Who is in which team with which role, archived teams left out, teams by name. */
+export function listMembershipsOfAll(db: Database) {
+  return db
+    .select({ personId: memberships.personId, team: teams.key, teamName: teams.name, role: memberships.role })
+    .from(memberships)
+    .innerJoin(teams, eq(teams.id, memberships.teamId))
+    .where(eq(teams.isArchived, false))
+    .orderBy(asc(teams.name))
+    .all();
 }
