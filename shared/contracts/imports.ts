@@ -1,9 +1,17 @@
 import * as z from 'zod';
+import { patchOf } from './patch-of';
 import { JobRunView } from './job-runs';
 import { Problem } from './problem';
-import { Remark, SweepTags } from './sweeps';
+import { Remark, SomeSweepTags } from './sweeps';
 
-/** POST /api/teams/:team/readings (multipart `file`, optional `options`): what a file holds, nothing stored. */
+/** Field `options` (JSON) of POST /api/teams/:team/readings: what the file leaves out. */
+export const ReadingOptions = SomeSweepTags.pick({ frequencyUnit: true, levelUnit: true });
+
+/**
+ * POST /api/teams/:team/readings (multipart `file`, optional `options`): what a file holds; nothing is stored. The same
+ * call with `Accept: application/octet-stream` answers every trace in full, as a frame of shared/traces/frames.ts with
+ * `PreviewTrace` as the meta of each: the page asks for it when it draws the spectrum over the limit before saving.
+ */
 export const ReadingView = z.object({
   fileName: z.string(),
   sha256: z.string(),
@@ -15,6 +23,7 @@ export const ReadingView = z.object({
   delimiter: z.string(),
   decimalMark: z.string(),
   rbwHz: z.number().nullable(),
+  attenuationDb: z.number().nullable(),
   traces: z.array(
     z.object({
       trace: z.int(),
@@ -30,10 +39,13 @@ export const ReadingView = z.object({
 });
 export type ReadingView = z.infer<typeof ReadingView>;
 
+/** `meta` of every trace of a preview frame. */
+export type PreviewTrace = ReadingView['traces'][number];
+
 /** Tags common to a batch and those of one trace laid over them; together they must make complete `SweepTags`. */
-export const BatchTags = SweepTags.partial();
+export const BatchTags = SomeSweepTags;
 export type BatchTags = z.infer<typeof BatchTags>;
-export const BatchItemTags = SweepTags.partial();
+export const BatchItemTags = SomeSweepTags;
 export type BatchItemTags = z.infer<typeof BatchItemTags>;
 
 /**

@@ -1,37 +1,46 @@
+import { FREQUENCY_UNITS } from '@shared/units/frequency-unit';
+import { LEVEL_UNITS } from '@shared/units/level-unit';
 import * as z from 'zod';
 import { DetectorName, Line, Name, SweepKind, Time } from './primitives';
 import { SwitchingStage } from './switching';
 
+/** The tags without their defaults, so that sets of tags can be laid over each other. */
+const tagFields = {
+  product: z.string().min(1),
+  hardware: Name,
+  firmware: Name,
+  unit: z.string().trim().min(1).max(120).optional(),
+  state: Name,
+  bench: z.string().min(1),
+  line: Line,
+  detector: DetectorName,
+  kind: SweepKind,
+  takenAt: Time.optional().describe('default: the time of the upload'),
+  rbwHz: z.number().positive().max(1e6).optional(),
+  attenuationDb: z.number().min(-100).max(100).optional().describe('set at the receiver, already part of its reading'),
+  run: z.string().trim().min(1).max(120).optional().describe('default: the day and bench'),
+  trace: z.int().min(1).max(64).describe('which level column, 1 first'),
+  frequencyUnit: z.enum(FREQUENCY_UNITS).optional(),
+  levelUnit: z.enum(LEVEL_UNITS).optional(),
+  corrected: z.boolean().describe('whether the file already holds corrected levels'),
+  switching: z.array(SwitchingStage).max(8).optional(),
+};
+
 /** `tags` of POST /api/v1/sweeps */
 export const SweepTags = z
-  .object({
-    product: z.string().min(1),
-    hardware: Name,
-    firmware: Name,
-    unit: z.string().trim().min(1).max(120).optional(),
-    state: Name,
-    bench: z.string().min(1),
-    line: Line,
-    detector: DetectorName,
-    kind: SweepKind.default('product'),
-    takenAt: Time.optional().describe('default: the time of the upload'),
-    rbwHz: z.number().positive().max(1e6).optional(),
-    attenuationDb: z
-      .number()
-      .min(-100)
-      .max(100)
-      .optional()
-      .describe('set at the receiver, already part of its reading'),
-    run: z.string().trim().min(1).max(120).optional().describe('default: the day and bench'),
-    trace: z.int().min(1).max(64).default(1).describe('which level column, 1 first'),
-    frequencyUnit: z.enum(['Hz', 'kHz', 'MHz', 'GHz']).optional(),
-    levelUnit: z.enum(['dBuV', 'dBm', 'dBmV']).optional(),
-    corrected: z.boolean().default(false).describe('whether the file already holds corrected levels'),
-    switching: z.array(SwitchingStage).max(8).optional(),
+  .strictObject({
+    ...tagFields,
+    kind: tagFields.kind.default('product'),
+    trace: tagFields.trace.default(1),
+    corrected: tagFields.corrected.default(false),
   })
   .meta({ id: 'SweepTags' });
 export type SweepTags = z.infer<typeof SweepTags>;
 export type SweepTagsInput = z.input<typeof SweepTags>;
+
+/** Some of the tags, without defaults; several laid over each other must make complete `SweepTags`. */
+export const SomeSweepTags = z.strictObject(tagFields).partial();
+export type SomeSweepTags = z.infer<typeof SomeSweepTags>;
 
 export const MarginPointView = z
   .object({ marginDb: z.number(), frequencyHz: z.number(), levelDbuv: z.number(), limitDbuv: z.number() })
@@ -45,7 +54,7 @@ export const BandMarginView = z
 export const Remark = z.object({ code: z.string(), text: z.string() }).meta({ id: 'Remark' });
 export type Remark = z.infer<typeof Remark>;
 
-/** GET /api/v1/sweeps/:id and a row of GET /api/v1/sweeps?team&product&build&state&bench&line&detector&kind&before&limit */
+/** GET /api/v1/sweeps/:id and a row of GET /api/v1/sweeps */
 export const SweepView = z
   .object({
     id: z.int(),
@@ -81,6 +90,21 @@ export const SweepView = z
   })
   .meta({ id: 'Sweep' });
 export type SweepView = z.infer<typeof SweepView>;
+
+/** Query of GET /api/v1/sweeps, newest import first; without team and product: of all teams of the caller. */
+export const SweepQuery = z.object({
+  team: z.string().optional(),
+  product: z.string().optional(),
+  build: z.coerce.number().int().positive().optional(),
+  state: z.string().optional(),
+  bench: z.string().optional(),
+  line: Line.optional(),
+  detector: DetectorName.optional(),
+  kind: SweepKind.optional(),
+  before: z.coerce.number().int().positive().optional().describe('`nextBefore` of the page before'),
+  limit: z.coerce.number().int().min(1).max(200).default(50),
+});
+export type SweepQuery = z.infer<typeof SweepQuery>;
 export const SweepPage = z.object({ sweeps: z.array(SweepView), nextBefore: z.int().nullable() });
 export type SweepPage = z.infer<typeof SweepPage>;
 
@@ -98,26 +122,52 @@ export const TraceView = z
   })
   .meta({ id: 'Trace' });
 
-/** JSON header of a binary overlay, GET /api/v1/overlay?product&team&sweeps=1,2&builds=3,4&state&line&detector */
-export interface OverlayHeader {
-  traces: {
-    sweepId: number;
-    label: string;
-    buildId: number;
-    hardware: string;
-    firmware: string;
-    state: string;
-    line: string;
-    detector: string;
-    kind: string;
-    takenAt: string;
-    /** Which frequency grid of the frame, 0 first. */
-    grid: number;
-    worst: MarginPointView | null;
-  }[];
-  limits: {
+/** Most traces one overlay holds. */
+export const OVERLAY_MOST_TRACES = 40;
+const Ids = z
+  .string()
+  .transform((text) => (text === '' ? [] : text.split(',').map(Number)))
+  .pipe(z.array(z.int().positive()).max(OVERLAY_MOST_TRACES));
+
+/**
+ * Query of GET /api/v1/overlay: sweeps by number, and for every build and series (state, line, detector) that the filter
+ * leaves the newest run's sweep with the least margin. `kind=background` adds the background sweeps of the same bench and
+ * day. More than 40 traces are refused: narrow the filter.
+ */
+export const OverlayQuery = z.object({
+  team: z.string().optional(),
+  product: z.string(),
+  sweeps: Ids.optional(),
+  builds: Ids.optional(),
+  state: z.string().optional(),
+  line: Line.optional(),
+  detector: DetectorName.optional(),
+  kind: z.enum(['product', 'background']).default('product'),
+});
+export type OverlayQuery = z.infer<typeof OverlayQuery>;
+
+/**
+ * `meta` of every trace in the frame of shared/traces/frames.ts that GET /api/v1/overlay and
+ * GET /api/v1/sweeps/:id/trace (`Accept: application/octet-stream`) answer.
+ */
+export interface OverlayTrace {
+  sweepId: number;
+  label: string;
+  buildId: number;
+  hardware: string;
+  firmware: string;
+  state: string;
+  bench: string;
+  line: string;
+  detector: string;
+  kind: string;
+  run: string;
+  takenAt: string;
+  worst: MarginPointView | null;
+  /** The limit line the trace is held against; a PK trace against the QP line. */
+  limit: {
     detector: string;
     title: string;
     segments: { fromHz: number; toHz: number; fromDbuv: number; toDbuv: number }[];
-  }[];
+  };
 }
