@@ -1,6 +1,7 @@
-import { and, asc, desc, eq, gte, max, sql } from 'drizzle-orm';
+import { OPEN_DROP_STATES } from '@shared/contracts/drops';
+import { and, asc, count, desc, eq, gt, gte, inArray, max, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
-import { builds, firmwareRevisions, hardwareRevisions, products } from '../db/schema';
+import { builds, drops, firmwareRevisions, hardwareRevisions, products } from '../db/schema';
 
 export type Build = typeof builds.$inferSelect;
 
@@ -69,6 +70,15 @@ export function shiftPositions(db: Database, productId: number, from: number): v
     .run();
 }
 
+/** Takes a build out of the order; the caller gives it a new position. */
+export function removePosition(db: Database, productId: number, build: Build): void {
+  updateBuild(db, build.id, { position: 0, builtAt: 0 });
+  db.update(builds)
+    .set({ position: sql`${builds.position} - 1` })
+    .where(and(eq(builds.productId, productId), gt(builds.position, build.position)))
+    .run();
+}
+
 export function insertBuild(db: Database, build: typeof builds.$inferInsert): Build {
   return db.insert(builds).values(build).returning().get();
 }
@@ -90,4 +100,15 @@ export function updateLatestBuild(db: Database, productId: number): void {
     .set({ latestBuildId: latest?.id ?? null })
     .where(eq(products.id, productId))
     .run();
+}
+
+/** Open drops of a product's builds; builds without any are absent. */
+export function openDropsByBuild(db: Database, productId: number): Map<number, number> {
+  const rows = db
+    .select({ buildId: drops.buildId, drops: count() })
+    .from(drops)
+    .where(and(eq(drops.productId, productId), inArray(drops.state, [...OPEN_DROP_STATES])))
+    .groupBy(drops.buildId)
+    .all();
+  return new Map(rows.map((row) => [row.buildId, row.drops]));
 }

@@ -4,13 +4,7 @@ import type { Actor } from '../actor';
 import type { Context } from '../context';
 import { requirePermission } from '../require-permission';
 import { ServiceError } from '../service-error';
-import {
-  findProductById,
-  findReachableProducts,
-  type Product,
-  type ProductOfTeam,
-  shareTeamIds,
-} from './product-store';
+import { findProductById, findReachableProducts, type Product, type ProductOfTeam, listShares } from './product-store';
 
 export interface FoundProduct extends ProductOfTeam {
   /** Owned by another team and read through a share. */
@@ -70,7 +64,7 @@ export function productById(context: Context, id: number): Product {
 }
 
 function isReadThroughShare(context: Context, actor: Actor, product: Product): boolean {
-  return shareTeamIds(context.db, product.id).some((teamId) => may(actor, 'results.read', teamId));
+  return listShares(context.db, product.id).some((team) => may(actor, 'results.read', team.id));
 }
 
 function teamsOf(actor: Actor): number[] {

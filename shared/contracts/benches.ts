@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { patchOf } from './patch-of';
 import { Key, Name, Notes } from './primitives';
 
 /** GET /api/teams/:team/benches */
@@ -27,4 +28,6 @@ export const BenchInput = z.object({
   receiver: z.string().max(400).default(''),
   notes: Notes.default(''),
 });
-export const BenchPatch = BenchInput.omit({ key: true }).partial().extend({ isArchived: z.boolean().optional() });
+export const BenchPatch = patchOf(BenchInput.omit({ key: true }))
+  .partial()
+  .extend({ isArchived: z.boolean().optional() });

@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { patchOf } from './patch-of';
 import { Name, Notes, Time, VerdictName } from './primitives';
 import { SwitchingStage } from './switching';
 
@@ -54,4 +55,4 @@ export const BuildInput = z.object({
 });
 export type BuildInput = z.infer<typeof BuildInput>;
 /** PATCH /api/v1/products/:key/builds/:id */
-export const BuildPatch = BuildInput.omit({ hardware: true, firmware: true }).partial();
+export const BuildPatch = patchOf(BuildInput.omit({ hardware: true, firmware: true }));

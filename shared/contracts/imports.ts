@@ -1,11 +1,10 @@
 import * as z from 'zod';
-import { patchOf } from './patch-of';
 import { JobRunView } from './job-runs';
 import { Problem } from './problem';
-import { Remark, SomeSweepTags } from './sweeps';
+import { Remark, SweepTags } from './sweeps';
 
 /** Field `options` (JSON) of POST /api/teams/:team/readings: what the file leaves out. */
-export const ReadingOptions = SomeSweepTags.pick({ frequencyUnit: true, levelUnit: true });
+export const ReadingOptions = SweepTags.pick({ frequencyUnit: true, levelUnit: true });
 
 /**
  * POST /api/teams/:team/readings (multipart `file`, optional `options`): what a file holds; nothing is stored. The same
@@ -43,9 +42,9 @@ export type ReadingView = z.infer<typeof ReadingView>;
 export type PreviewTrace = ReadingView['traces'][number];
 
 /** Tags common to a batch and those of one trace laid over them; together they must make complete `SweepTags`. */
-export const BatchTags = SomeSweepTags;
+export const BatchTags = patchOf(SweepTags).strict();
 export type BatchTags = z.infer<typeof BatchTags>;
-export const BatchItemTags = SomeSweepTags;
+export const BatchItemTags = patchOf(SweepTags).strict();
 export type BatchItemTags = z.infer<typeof BatchItemTags>;
 
 /**

@@ -1,12 +1,15 @@
 import * as z from 'zod';
-import { VerdictName } from './primitives';
+import { DetectorName, Line, VerdictName } from './primitives';
 
 /** Filter of trend and margin map; leave out to take the worst over all. */
 export const SeriesFilter = z.object({
   state: z.string().optional(),
-  line: z.string().optional(),
-  detector: z.string().optional(),
+  line: Line.optional(),
+  detector: DetectorName.optional(),
 });
+export type SeriesFilter = z.infer<typeof SeriesFilter>;
+/** Query of the trend: a band on top. */
+export const TrendQuery = SeriesFilter.extend({ band: z.string().optional() });
 
 /** GET /api/v1/products/:key/trend?state&line&detector&band */
 export const TrendView = z

@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { patchOf } from './patch-of';
 import { Key, Name, Notes, VerdictName } from './primitives';
 
 export const StateView = z
@@ -21,6 +22,7 @@ export const StateInput = z.object({
   mode: z.string().max(120).default(''),
   isRequired: z.boolean().default(true),
 });
+export const StatePatch = patchOf(StateInput);
 
 /** GET /api/v1/products: those of the caller's teams and those shared with them; `?team=` narrows. */
 export const ProductSummary = z
@@ -86,7 +88,7 @@ export const ProductInput = z.object({
   limitSetKey: z.string(),
   targetMarginDb: z.number().min(0).max(40).nullable().default(null),
 });
-export const ProductPatch = ProductInput.omit({ key: true }).partial();
+export const ProductPatch = patchOf(ProductInput.omit({ key: true }));
 /** PUT /api/v1/products/:key/reference {buildId|null, reason} */
 export const ReferenceChoice = z.object({
   buildId: z.int().nullable(),

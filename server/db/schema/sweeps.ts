@@ -85,6 +85,18 @@ export const sweeps = sqliteTable(
   (table) => [
     uniqueIndex('sweeps_identity').on(table.productId, table.identity),
     index('sweeps_build').on(table.buildId, table.kind),
+    // Covers the trend: no sweep row is read for it.
+    index('sweeps_trend').on(
+      table.productId,
+      table.kind,
+      table.buildId,
+      table.stateId,
+      table.line,
+      table.detector,
+      table.run,
+      table.worstMarginDb,
+      table.worstFrequencyHz,
+    ),
     index('sweeps_product_taken').on(table.productId, table.takenAt),
     index('sweeps_bench_taken').on(table.benchId, table.takenAt),
     index('sweeps_team_imported').on(table.teamId, table.importedAt),
