@@ -1,9 +1,15 @@
-import { and, asc, eq, gt, gte, isNull, sql } from 'drizzle-orm';
+import { and, asc, eq, gt, gte, isNotNull, isNull, or, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
 import { builds, products, teams } from '../db/schema';
 
-/** Data of the build came in after the version it was judged at; a build without sweeps has nothing to judge. */
-const isStale = and(gt(builds.dataVersion, builds.judgedVersion), gt(builds.sweepCount, 0));
+/**
+ * Data of the build changed after the version it was judged at. A build without sweeps has nothing to judge, unless it
+ * was judged once and lost its sweeps since.
+ */
+const isStale = and(
+  gt(builds.dataVersion, builds.judgedVersion),
+  or(gt(builds.sweepCount, 0), isNotNull(builds.judgedAt)),
+);
 
 /** Raises the data version of the product's measured builds at and after the position. */
 export function raiseDataVersions(db: Database, productId: number, fromPosition: number): void {
@@ -33,4 +39,15 @@ export function listStaleProducts(db: Database): { id: number; teamId: number }[
     .where(and(isStale, isNull(products.archivedAt), eq(teams.isArchived, false)))
     .orderBy(asc(products.id))
     .all();
+}
+
+/** Products in use of a team. */
+export function listProductIds(db: Database, teamId: number): number[] {
+  return db
+    .select({ id: products.id })
+    .from(products)
+    .where(and(eq(products.teamId, teamId), isNull(products.archivedAt)))
+    .orderBy(asc(products.id))
+    .all()
+    .map(({ id }) => id);
 }
