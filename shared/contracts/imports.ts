@@ -1,5 +1,6 @@
 import * as z from 'zod';
 import { JobRunView } from './job-runs';
+import { patchOf } from './patch-of';
 import { Problem } from './problem';
 import { Remark, SweepTags } from './sweeps';
 
