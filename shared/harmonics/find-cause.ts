@@ -1,7 +1,7 @@
 import { nameHarmonic } from './match-harmonic';
 import type { SwitchingStage } from './switching-stage';
 
-/** A switching frequency that moved less than this did not change: resistor-capacitor oscillators spread that much between lots. */
+/** Declared frequencies closer than this are one value written with unlike digits. Our own definition. */
 const CHANGED_SHARE = 0.003;
 
 /** The harmonic at the worst point, where it was and where it is. */

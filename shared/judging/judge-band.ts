@@ -113,8 +113,9 @@ export function judgeBand(
   const pAdjusted = isLoss ? adjustedP.lossP : adjustedP.gainP;
   const buildRuns = build.runCount;
   const referenceRuns = reference.runCount;
+  const isOpen = reasons.some(({ code }) => code === 'withinSpread');
   const adjustment = p > 0 ? pAdjusted / p : 1;
-  const needed = runsToSettle({ ...test, thresholdDb, spread, buildRuns, referenceRuns, adjustment });
+  const question = { ...test, thresholdDb, spread, buildRuns, referenceRuns, adjustment };
   const previous = sideOrNull(band.previous);
   const standingSide = summariseSide(band.build.filter((sweep) => hasMargin(sweep, series.limitLineKey)));
   const evidence = { build, reference, buildMask, referenceMask, verdict, detector: series.detector };
@@ -139,7 +140,7 @@ export function judgeBand(
     ...standing(standingSide.worst.marginDb, input),
     reasons,
     remarks: [...remarks, ...compareSetUps(build, reference), ...remarkEvidence(evidence)],
-    settles: verdict === 'cannotSay' ? settlesFor(reasons, needed) : [],
+    settles: settlesFor(reasons, isOpen ? runsToSettle(question) : null),
     buildSweepIds: sweepIds(build.sweeps),
     referenceSweepIds: sweepIds(reference.sweeps),
   };
