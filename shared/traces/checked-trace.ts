@@ -1,4 +1,3 @@
-import { formatFrequency } from '../units/format-frequency';
 import type { FrequencyFault } from './frequency-grid';
 import { findFrequencyFault } from './frequency-grid';
 import { ReadingError } from './reading-error';
@@ -44,7 +43,7 @@ export function checkFrequencies(frequenciesHz: Float64Array, dataLine: number, 
     throw new ReadingError({
       line: dataLine,
       column,
-      found: `a sweep from ${formatFrequency(frequenciesHz[0])} to ${formatFrequency(frequenciesHz[count - 1])}`,
+      found: `a sweep from ${frequenciesHz[0]} Hz to ${frequenciesHz[count - 1]} Hz`,
       expected: 'a sweep of emissions between 1 kHz and 10 GHz',
       advice: 'Check the unit of frequency.',
     });

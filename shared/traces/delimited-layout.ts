@@ -106,8 +106,8 @@ function firstDataLine(lines: readonly TextLine[], form: FormCount): number {
 
 function isBrokenRow({ text }: TextLine, { delimiter, decimalMark }: FormCount): boolean {
   const cells = splitCells(text, delimiter);
-  if (cells.length < 2 || !MEANT_AS_NUMBER.test(cells[0])) return false;
-  return isNumberText(cells[0], decimalMark) || cells.slice(1).some((cell) => isNumberText(cell, decimalMark));
+  if (isNumberText(cells[0], decimalMark)) return true;
+  return MEANT_AS_NUMBER.test(cells[0]) && cells.slice(1).some((cell) => isNumberText(cell, decimalMark));
 }
 
 /** The first comma or point in the table, which must be its decimal mark. */
