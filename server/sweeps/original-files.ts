@@ -17,8 +17,7 @@ export class OriginalFiles {
   constructor(private readonly folder: string) {}
 
   /** Keeps the bytes; the same bytes twice are one file. Returns their SHA-256. */
-  keep(bytes: Uint8Array): string {
-    const hash = sha256(bytes);
+  keep(bytes: Uint8Array, hash = sha256(bytes)): string {
     const path = this.pathOf(hash);
     if (existsSync(path)) return hash;
     mkdirSync(dirname(path), { recursive: true });

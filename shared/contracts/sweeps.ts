@@ -4,43 +4,36 @@ import * as z from 'zod';
 import { DetectorName, Line, Name, SweepKind, Time } from './primitives';
 import { SwitchingStage } from './switching';
 
-/** The tags without their defaults, so that sets of tags can be laid over each other. */
-const tagFields = {
-  product: z.string().min(1),
-  hardware: Name,
-  firmware: Name,
-  unit: z.string().trim().min(1).max(120).optional(),
-  state: Name,
-  bench: z.string().min(1),
-  line: Line,
-  detector: DetectorName,
-  kind: SweepKind,
-  takenAt: Time.optional().describe('default: the time of the upload'),
-  rbwHz: z.number().positive().max(1e6).optional(),
-  attenuationDb: z.number().min(-100).max(100).optional().describe('set at the receiver, already part of its reading'),
-  run: z.string().trim().min(1).max(120).optional().describe('default: the day and bench'),
-  trace: z.int().min(1).max(64).describe('which level column, 1 first'),
-  frequencyUnit: z.enum(FREQUENCY_UNITS).optional(),
-  levelUnit: z.enum(LEVEL_UNITS).optional(),
-  corrected: z.boolean().describe('whether the file already holds corrected levels'),
-  switching: z.array(SwitchingStage).max(8).optional(),
-};
-
 /** `tags` of POST /api/v1/sweeps */
 export const SweepTags = z
   .strictObject({
-    ...tagFields,
-    kind: tagFields.kind.default('product'),
-    trace: tagFields.trace.default(1),
-    corrected: tagFields.corrected.default(false),
+    product: z.string().min(1),
+    hardware: Name,
+    firmware: Name,
+    unit: z.string().trim().min(1).max(120).optional(),
+    state: Name,
+    bench: z.string().min(1),
+    line: Line,
+    detector: DetectorName,
+    kind: SweepKind.default('product'),
+    takenAt: Time.optional().describe('default: the time of the upload'),
+    rbwHz: z.number().positive().max(1e6).optional(),
+    attenuationDb: z
+      .number()
+      .min(-100)
+      .max(100)
+      .optional()
+      .describe('set at the receiver, already part of its reading'),
+    run: z.string().trim().min(1).max(120).optional().describe('default: the day and bench'),
+    trace: z.int().min(1).max(64).default(1).describe('which level column, 1 first'),
+    frequencyUnit: z.enum(FREQUENCY_UNITS).optional(),
+    levelUnit: z.enum(LEVEL_UNITS).optional(),
+    corrected: z.boolean().default(false).describe('whether the file already holds corrected levels'),
+    switching: z.array(SwitchingStage).max(8).optional(),
   })
   .meta({ id: 'SweepTags' });
 export type SweepTags = z.infer<typeof SweepTags>;
 export type SweepTagsInput = z.input<typeof SweepTags>;
-
-/** Some of the tags, without defaults; several laid over each other must make complete `SweepTags`. */
-export const SomeSweepTags = z.strictObject(tagFields).partial();
-export type SomeSweepTags = z.infer<typeof SomeSweepTags>;
 
 export const MarginPointView = z
   .object({ marginDb: z.number(), frequencyHz: z.number(), levelDbuv: z.number(), limitDbuv: z.number() })

@@ -1,0 +1,41 @@
+import { and, asc, count, eq, max } from 'drizzle-orm';
+import type { Database } from '../db/open-database';
+import { benches, sweeps } from '../db/schema';
+
+export type Bench = typeof benches.$inferSelect;
+export type BenchChange = Partial<Omit<typeof benches.$inferInsert, 'id' | 'teamId' | 'key' | 'createdAt'>>;
+
+export interface BenchUse {
+  sweepCount: number;
+  lastSweepAt: number | null;
+}
+
+export function listBenchesOf(db: Database, teamId: number): Bench[] {
+  return db.select().from(benches).where(eq(benches.teamId, teamId)).orderBy(asc(benches.name)).all();
+}
+
+export function findBenchByKey(db: Database, teamId: number, key: string): Bench | undefined {
+  return db
+    .select()
+    .from(benches)
+    .where(and(eq(benches.teamId, teamId), eq(benches.key, key)))
+    .get();
+}
+
+export function insertBench(db: Database, bench: typeof benches.$inferInsert): Bench {
+  return db.insert(benches).values(bench).returning().get();
+}
+
+export function updateBench(db: Database, id: number, change: BenchChange): Bench {
+  return db.update(benches).set(change).where(eq(benches.id, id)).returning().get();
+}
+
+/** How many sweeps a bench took, and when the last one; read from an index alone. */
+export function benchUse(db: Database, benchId: number): BenchUse {
+  const use = db
+    .select({ sweepCount: count(), lastSweepAt: max(sweeps.takenAt) })
+    .from(sweeps)
+    .where(eq(sweeps.benchId, benchId))
+    .get();
+  return use ?? { sweepCount: 0, lastSweepAt: null };
+}

@@ -1,0 +1,54 @@
+import type { Detector } from '@shared/detectors/detectors';
+import { bandsFor } from '@shared/limits/bands';
+import { cellEdgesHz } from '@shared/limits/cells';
+import type { LimitLine } from '@shared/limits/limit-line';
+import type { LimitSet } from '@shared/limits/limit-set';
+import { findLimitSet, lineForDetector } from '@shared/limits/limit-sets';
+import { type PreparedGrid, prepareGrid } from '@shared/traces/margins';
+import type { TeamBand } from '../db/schema/teams';
+import { ServiceError } from '../service-error';
+
+/** Most grids a bench park uses at once, times detectors; one of 60,000 points takes 1 MB. */
+const MOST_KEPT = 48;
+const CELL_EDGES_HZ = cellEdgesHz();
+const kept = new Map<string, PreparedGrid>();
+
+export interface PlannedLine {
+  set: LimitSet;
+  line: LimitLine;
+}
+
+/** The limit line for a detector. @throws ServiceError `conflict` when the product's plan has none */
+export function plannedLine(limitSetKey: string, detector: Detector): PlannedLine {
+  const set = findLimitSet(limitSetKey);
+  const line = set && lineForDetector(set, detector);
+  if (set === undefined || line === undefined) {
+    throw new ServiceError(
+      'conflict',
+      `the product's limit plan "${limitSetKey}" has no line for detector ${detector}`,
+    );
+  }
+  return { set, line };
+}
+
+/** The grid made ready for margins; the least recently used are forgotten. */
+export function preparedGrid(
+  gridHash: string,
+  frequenciesHz: Float64Array,
+  { set, line }: PlannedLine,
+  teamBands: readonly TeamBand[],
+): PreparedGrid {
+  const key = JSON.stringify([gridHash, set.key, set.version, line.detector, teamBands]);
+  const found = kept.get(key);
+  if (found !== undefined) {
+    kept.delete(key);
+    kept.set(key, found);
+    return found;
+  }
+  const own = teamBands.map(({ name, fromHz, toHz }) => ({ key: name, fromHz, toHz }));
+  const prepared = prepareGrid(frequenciesHz, line, bandsFor(line, own), CELL_EDGES_HZ);
+  kept.set(key, prepared);
+  const oldest = kept.keys().next();
+  if (kept.size > MOST_KEPT && !oldest.done) kept.delete(oldest.value);
+  return prepared;
+}
