@@ -1,5 +1,5 @@
 import type { OperatingCourse, Spreading } from '@shared/simulation/switching-stage';
-import { type BuildRow, DAY_MS, writeBuilds } from './scenario-builds';
+import { type BuildRow, DAY_MS, type MeasuringHabit, writeBuilds } from './scenario-builds';
 import type { DemoProduct, DemoState, FirmwareControl, FirmwareRevision, HardwareRevision } from './scenario-types';
 
 const HIGH_MAINS = '230 V 2.25 A';
@@ -24,11 +24,7 @@ export function adapterProduct(nowMs: number): DemoProduct {
     units: ['AD-0202', 'AD-0209'],
     hardwareRevisions: HARDWARE,
     firmwareRevisions: FIRMWARE,
-    builds: writeBuilds(
-      HISTORY,
-      { states: [HIGH_MAINS, LOW_MAINS, IDLE], unit: 'AD-0202', bench: 'bench-2', hourUtc: 8 },
-      nowMs,
-    ),
+    builds: writeBuilds(HISTORY, HABIT, nowMs),
     references: [
       {
         build: { hardware: 'A2', firmware: '0.7.0' },
@@ -36,11 +32,39 @@ export function adapterProduct(nowMs: number): DemoProduct {
         chosenByEmail: 'runa.fellgarth@brackenholt.example',
         reason: 'Last build of the old filter.',
       },
+      {
+        build: { hardware: 'A3', firmware: '1.0.0' },
+        chosenAtMs: nowMs - 25 * DAY_MS,
+        chosenByEmail: 'runa.fellgarth@brackenholt.example',
+        reason: 'Release.',
+      },
     ],
     dropActions: [],
     clockSpread: { unitPercent: 0.4, sessionPercent: 0.03 },
   };
 }
+
+/**
+ * The adapter with one build more than the demo holds, for files that are imported by hand.
+ *
+ * @param nowMs the demo's now, UTC ms
+ * @returns the product whose last build is the next one
+ */
+export function adapterWithNextBuild(nowMs: number): DemoProduct {
+  const product = adapterProduct(nowMs);
+  return {
+    ...product,
+    firmwareRevisions: [...product.firmwareRevisions, NEXT_FIRMWARE],
+    builds: [...product.builds, ...writeBuilds([NEXT_BUILD], HABIT, nowMs)],
+  };
+}
+
+const HABIT: MeasuringHabit = {
+  states: [HIGH_MAINS, LOW_MAINS, IDLE],
+  unit: 'AD-0202',
+  bench: 'bench-2',
+  hourUtc: 8,
+};
 
 function state(
   name: string,
@@ -84,7 +108,7 @@ const BOARD_A1: HardwareRevision = {
       riseTimeS: 70e-9,
       fallTimeS: 45e-9,
       strayCapacitanceF: 4e-12,
-      differential: { kind: 'pulsedCurrent', amplitudeA: 1.1 },
+      differential: { kind: 'pulsedCurrent', amplitudeA: 1.5 },
       ringing: { frequencyHz: 14e6, quality: 8, heightDb: 8 },
     },
   ],
@@ -113,12 +137,23 @@ const HARDWARE: HardwareRevision[] = [
 
 const JITTER: Spreading = { peakToPeakPercent: 6, modulationHz: 400, profile: 'triangle' };
 
-function firmware(name: string, commit: string, notes: string): FirmwareRevision {
+function firmware(name: string, commit: string, notes: string, frequencyHz = 65_000): FirmwareRevision {
   const control: Record<string, FirmwareControl> = {
-    flyback: { frequencyHz: 65_000, spreading: JITTER, edgeFactor: 1 },
+    flyback: { frequencyHz, spreading: JITTER, edgeFactor: 1 },
   };
   return { name, commit, notes, control };
 }
+
+/** The build a newcomer imports by hand: the flyback at 79 kHz brings its second harmonic from 130 to 158 kHz. */
+const NEXT_FIRMWARE = firmware('1.1.0', 'd6b80f23', 'Flyback 65 to 79 kHz for a smaller transformer.', 79_000);
+const NEXT_BUILD: BuildRow = {
+  hardware: 'A3',
+  firmware: NEXT_FIRMWARE.name,
+  daysAgo: 3,
+  changes: ['flyback 65 to 79 kHz'],
+  runs: 2,
+  background: true,
+};
 
 const FIRMWARE: FirmwareRevision[] = [
   firmware('0.4.0', 'a27f05e9', 'First samples.'),

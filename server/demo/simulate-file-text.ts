@@ -23,20 +23,21 @@ const LINE_FEED = 10;
  *
  * Bytes are written straight into one array, because a demo of some hundred files of 6,634 rows is made at the first start.
  *
- * @param preamble whole lines, without line ends
+ * @param preamble key and text of the lines above the table; texts must not hold the delimiter
  * @param raster tuned frequencies; start and step in Hz, multiples of 1 Hz
  * @param columns levels, each as long as the raster
  * @param layout delimiter and decimal mark, not the same sign
  * @returns the file's bytes, ASCII
  */
 export function fileText(
-  preamble: string[],
+  preamble: [key: string, text: string][],
   raster: FrequencyRaster,
   columns: LevelColumn[],
   layout: FileLayout = { delimiter: ',', decimalMark: '.' },
 ): Uint8Array {
   const heading = ['Frequency (Hz)', ...columns.map((column) => column.heading)].join(layout.delimiter);
-  const head = new TextEncoder().encode([...preamble, heading, ''].join('\n'));
+  const lines = preamble.map(([key, text]) => `${key}${layout.delimiter}${text}`);
+  const head = new TextEncoder().encode([...lines, heading, ''].join('\n'));
   const bytes = new Uint8Array(head.length + raster.pointCount * (columns.length + 1) * CELL_BYTES);
   bytes.set(head);
   const delimiter = layout.delimiter.charCodeAt(0);

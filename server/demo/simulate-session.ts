@@ -16,7 +16,7 @@ import {
 import { createSpreadShapes } from '@shared/simulation/spread-shapes';
 import type { DemoBench, DemoBuild, DemoProduct, DemoScenario, DemoSession } from './scenario-types';
 import { conditionOf, firmwareOf } from './simulate-condition';
-import { fileText } from './simulate-file-text';
+import { type FileLayout, fileText } from './simulate-file-text';
 
 /** 150 kHz to 30 MHz in steps of half the receiver's bandwidth. Source: CISPR 16-2-1, step at most RBW / 2. */
 export const DEMO_RASTER: FrequencyRaster = { startHz: 150_000, stepHz: 4500, pointCount: 6634 };
@@ -36,7 +36,7 @@ export interface DemoFile {
 /** Takes runs of the scenario's products; the same run always gives the same bytes. */
 export interface DemoSimulator {
   simulateLevels(product: DemoProduct, build: DemoBuild, session: DemoSession): SweepSet;
-  simulateSession(product: DemoProduct, build: DemoBuild, session: DemoSession): DemoFile;
+  simulateSession(product: DemoProduct, build: DemoBuild, session: DemoSession, layout?: FileLayout): DemoFile;
 }
 
 /**
@@ -71,18 +71,20 @@ export function createDemoSimulator(scenario: DemoScenario): DemoSimulator {
 
   return {
     simulateLevels,
-    simulateSession: (product, build, session) => {
+    simulateSession: (product, build, session, layout) => {
       const levels = simulateLevels(product, build, session);
+      const bench = benchOf(scenario, session.bench);
       const traces = session.lines.flatMap((line) => session.detectors.map((detector) => ({ line, detector })));
       return {
         fileName: fileNameOf(product, build, session),
         bytes: fileText(
-          preambleOf(product, build, session, benchOf(scenario, session.bench)),
+          preambleOf(product, build, session, bench),
           DEMO_RASTER,
           traces.map(({ line, detector }) => ({
             heading: `${line} ${detector} (dBuV)`,
             levelsDbuv: levels[line][detector],
           })),
+          layout,
         ),
         tags: traces.map(({ line, detector }, index) => ({
           ...commonTags(product, build, session),
@@ -107,7 +109,7 @@ function drawMeasuring(bench: DemoBench, session: DemoSession, setUp: string): M
   return drawSession(chain, ambientSpectra(carriers, DEMO_RASTER), DEMO_RASTER, random);
 }
 
-export function benchOf(scenario: DemoScenario, key: string): DemoBench {
+function benchOf(scenario: DemoScenario, key: string): DemoBench {
   const bench = scenario.benches.find((entry) => entry.key === key);
   if (bench === undefined) {
     throw new RangeError(`bench "${key}" is not part of the scenario`);
@@ -149,14 +151,13 @@ function commonTags(
 }
 
 /** The lines an instrument writes above its table; read by people and, where they are plain settings, by the import. */
-export function preambleOf(
+function preambleOf(
   product: DemoProduct,
   build: DemoBuild,
   session: DemoSession,
   bench: DemoBench,
-  delimiter = ',',
-): string[] {
-  const rows = [
+): [string, string][] {
+  return [
     ['Conducted emission', session.kind === 'background' ? 'device off' : product.name],
     ['Build', `${build.hardware} / ${build.firmware}`],
     ['State', session.state],
@@ -167,7 +168,6 @@ export function preambleOf(
     ['Dwell', `${DWELL_S * 1000} ms`],
     ['Attenuation', `${bench.attenuationDb} dB`],
   ];
-  return rows.map(([key, text]) => `${key}${delimiter}${text.replaceAll(delimiter, ' ')}`);
 }
 
 function fileNameOf(product: DemoProduct, build: DemoBuild, session: DemoSession): string {

@@ -18,9 +18,9 @@ export interface MeasuringSession {
 export type SweepSet = Record<'L' | 'N', Record<Detector, Float32Array>>;
 
 /** Level error of a set-up made anew: 0.5 dB in all, most of it common to all frequencies. */
-const SESSION_SPREAD = { offsetDb: 0.4, knotDb: 0.3, knots: 5 };
-/** Level error of a single run on one line. */
-const RUN_SPREAD = { offsetDb: 0.15, knotDb: 0.3, knots: 12 };
+const SESSION_SPREAD = { offsetDb: 0.45, knotDb: 0.2, knots: 5 };
+/** Level error of a single run on one line: 0.3 dB in all. */
+const RUN_SPREAD = { offsetDb: 0.25, knotDb: 0.2, knots: 12 };
 /** Scatter of the receiver from one tuned frequency to the next. */
 const READING_SPREAD_DB = 0.04;
 
