@@ -48,6 +48,7 @@ describe('interpolatePeak', () => {
 
   it.each([
     ['a slope', [1, 2, 3], 1],
+    ['a slope that flattens', [1, 3, 4], 1],
     ['a dip', [3, 1, 3], 1],
     ['a plateau', [2, 2, 2], 1],
     ['the first point', [3, 2, 1], 0],

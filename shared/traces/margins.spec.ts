@@ -77,6 +77,19 @@ describe('sweepMargins', () => {
     expect(bands[2].worst?.marginDb).toBeGreaterThan(10);
   });
 
+  it('counts a line beyond the edge of a band, where the limit steps down, in the next band only', () => {
+    const shiftedHz = gridHz.map((hz) => hz + 1500);
+    const prepared = prepareGrid(shiftedHz, classA, bandsFor(classA), cellEdgesHz());
+    const { bands, worst } = sweepMargins(withLine(flat(10), 500_100, 60, shiftedHz), prepared);
+    // Measured at 498 kHz 1.311 dB below the line's top, under 79 dBuV; the line itself stands under 73 dBuV (Table A.9).
+    expect(bands[0].worst).toMatchObject({ frequencyHz: 498_000, limitDbuv: 79, interpolated: false });
+    expect(bands[0].worst?.marginDb).toBeCloseTo(79 - 60 + 1.311, 3);
+    expect(bands[1].worst).toMatchObject({ limitDbuv: 73, interpolated: true });
+    expect(bands[1].worst?.frequencyHz).toBeCloseTo(500_100, -1);
+    expect(bands[1].worst?.marginDb).toBeCloseTo(13, 3);
+    expect(worst).toEqual(bands[1].worst);
+  });
+
   it('never makes a margin better than the measured point, and agrees between all, bands and cells', () => {
     const levelsOf = fc.array(fc.float({ min: 0, max: 80, noNaN: true }), { minLength: 400, maxLength: 400 });
     const spreadHz = Float64Array.from({ length: 400 }, (_, i) => Math.round(150_000 * 200 ** (i / 399)));

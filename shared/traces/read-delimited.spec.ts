@@ -215,6 +215,14 @@ describe('readDelimited', () => {
       expect(preamble).toHaveLength(2);
     });
 
+    it('takes a start frequency right above the table for a setting', () => {
+      const { preamble, frequencyUnit } = readDelimited(
+        bytesOf(`Unit;dBuV\nStart frequency;0.15 MHz\n${table({ delimiter: ';', points: 6634 })}`),
+      );
+      expect(preamble[1]).toEqual({ line: 2, key: 'Start frequency', value: '0.15 MHz' });
+      expect(frequencyUnit).toBe('Hz');
+    });
+
     it('reads a table below 60 lines', () => {
       const lines = Array.from({ length: 60 }, (_, i) => `Setting ${i};${i}`).join('\n');
       const reading = readDelimited(bytesOf(`${lines}\nf [Hz];QP [dBuV]\n${table({ delimiter: ';' })}`));
