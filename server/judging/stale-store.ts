@@ -1,6 +1,6 @@
 import { and, asc, eq, gt, gte, isNotNull, isNull, or, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
-import { builds, products, teams } from '../db/schema';
+import { builds, firmwareRevisions, hardwareRevisions, products, teams } from '../db/schema';
 
 /**
  * Data of the build changed after the version it was judged at. A build without sweeps has nothing to judge, unless it
@@ -20,10 +20,12 @@ export function raiseDataVersions(db: Database, productId: number, fromPosition:
 }
 
 /** Stale builds of a product, oldest first. */
-export function listStaleBuilds(db: Database, productId: number): { id: number; position: number }[] {
+export function listStaleBuilds(db: Database, productId: number): { id: number; hardware: string; firmware: string }[] {
   return db
-    .select({ id: builds.id, position: builds.position })
+    .select({ id: builds.id, hardware: hardwareRevisions.name, firmware: firmwareRevisions.name })
     .from(builds)
+    .innerJoin(hardwareRevisions, eq(hardwareRevisions.id, builds.hardwareId))
+    .innerJoin(firmwareRevisions, eq(firmwareRevisions.id, builds.firmwareId))
     .where(and(eq(builds.productId, productId), isStale))
     .orderBy(asc(builds.position))
     .all();
