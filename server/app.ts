@@ -12,7 +12,7 @@ import { auditRoutes } from './audit/audit-routes';
 import { benchRoutes } from './benches/bench-routes';
 import { buildRoutes } from './builds/build-routes';
 import type { Context } from './context';
-import { digestRoutes } from './digests/digest-routes';
+import { digestRoutes, unsubscribeRoutes } from './digests/digest-routes';
 import { dropRoutes } from './drops/drop-routes';
 import { guardCrossSite } from './http/cross-site';
 import { handleErrors } from './http/handle-errors';
@@ -71,7 +71,7 @@ export function createApp(context: Context): Express {
     }),
   );
 
-  app.use('/api', healthRoutes(context), express.json({ limit: '256kb' }));
+  app.use('/api', healthRoutes(context), unsubscribeRoutes(context), express.json({ limit: '256kb' }));
   app.use('/api', sessionOf(context), passport.session(), identify(context), guardCrossSite);
   for (const routes of FEATURES) app.use('/api', routes(context));
   app.use('/api', (request) => {

@@ -1,0 +1,122 @@
+import { OPEN_DROP_STATES } from '@shared/contracts/drops';
+import type { Detector, Line } from '@shared/detectors/detectors';
+import type { Verdict } from '@shared/judging/verdict';
+import { and, asc, eq, gte, inArray, lt, or } from 'drizzle-orm';
+import type { Database } from '../db/open-database';
+import {
+  builds,
+  drops,
+  firmwareRevisions,
+  hardwareRevisions,
+  operatingStates,
+  people,
+  products,
+  verdicts,
+} from '../db/schema';
+
+export interface DigestDrop {
+  id: number;
+  product: string;
+  sentence: string;
+  state: (typeof drops.$inferSelect)['state'];
+  owner: string | null;
+  marginDb: number;
+  isOverLimit: boolean;
+  createdAt: number;
+}
+
+/** Drops of a team that are open, or that were raised or ended between two moments; most urgent first. */
+export function listDigestDrops(db: Database, teamId: number, from: number, to: number): DigestDrop[] {
+  const touched = and(gte(drops.updatedAt, from), lt(drops.updatedAt, to));
+  return db
+    .select({
+      id: drops.id,
+      product: products.name,
+      sentence: drops.sentence,
+      state: drops.state,
+      owner: people.name,
+      marginDb: drops.marginDb,
+      isOverLimit: drops.isOverLimit,
+      createdAt: drops.createdAt,
+    })
+    .from(drops)
+    .innerJoin(products, eq(products.id, drops.productId))
+    .leftJoin(people, eq(people.id, drops.ownerId))
+    .where(and(eq(drops.teamId, teamId), or(inArray(drops.state, [...OPEN_DROP_STATES]), touched)))
+    .orderBy(asc(drops.marginDb))
+    .all();
+}
+
+export interface DigestGain {
+  product: string;
+  hardware: string;
+  firmware: string;
+  state: string;
+  band: string;
+  differenceDb: number | null;
+  marginDb: number | null;
+}
+
+/** Gains of the team's builds made between two moments, largest first in every build. */
+export function listDigestGains(db: Database, teamId: number, from: number, to: number): DigestGain[] {
+  return db
+    .select({
+      product: products.name,
+      hardware: hardwareRevisions.name,
+      firmware: firmwareRevisions.name,
+      state: operatingStates.name,
+      band: verdicts.band,
+      differenceDb: verdicts.differenceDb,
+      marginDb: verdicts.worstMarginDb,
+    })
+    .from(verdicts)
+    .innerJoin(builds, eq(builds.id, verdicts.buildId))
+    .innerJoin(products, eq(products.id, builds.productId))
+    .innerJoin(hardwareRevisions, eq(hardwareRevisions.id, builds.hardwareId))
+    .innerJoin(firmwareRevisions, eq(firmwareRevisions.id, builds.firmwareId))
+    .innerJoin(operatingStates, eq(operatingStates.id, verdicts.stateId))
+    .where(
+      and(
+        eq(products.teamId, teamId),
+        eq(verdicts.verdict, 'gained'),
+        gte(builds.builtAt, from),
+        lt(builds.builtAt, to),
+      ),
+    )
+    .all();
+}
+
+export interface JudgedMargin {
+  buildId: number;
+  stateId: number;
+  state: string;
+  line: Line;
+  detector: Detector;
+  band: string;
+  verdict: Verdict;
+  marginDb: number | null;
+  spreadDb: number | null;
+}
+
+/** Every judged band of a product in build order. */
+export function listJudgedMargins(db: Database, productId: number): JudgedMargin[] {
+  return db
+    .select({
+      buildId: verdicts.buildId,
+      stateId: verdicts.stateId,
+      state: operatingStates.name,
+      line: verdicts.line,
+      detector: verdicts.detector,
+      band: verdicts.band,
+      verdict: verdicts.verdict,
+      marginDb: verdicts.worstMarginDb,
+      judgement: verdicts.judgement,
+    })
+    .from(verdicts)
+    .innerJoin(builds, eq(builds.id, verdicts.buildId))
+    .innerJoin(operatingStates, eq(operatingStates.id, verdicts.stateId))
+    .where(eq(builds.productId, productId))
+    .orderBy(asc(builds.position))
+    .all()
+    .map(({ judgement, ...row }) => ({ ...row, spreadDb: judgement.spread?.sdDb ?? null }));
+}
