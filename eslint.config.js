@@ -48,10 +48,12 @@ const doors = {
   routes: { regex: '-routes$', message: 'Routes are mounted in server/app.ts only: call the verb behind the route.' },
   stores: {
     regex: '(^|/)(?!session-store$)[^/]*-store$',
+    allowTypeImports: true,
     message: 'A route or a job calls a verb; the verb calls its store.',
   },
   otherStores: {
     regex: '^\\.\\./(?!http/)[^.].*-store$',
+    allowTypeImports: true,
     message: "Another feature's store is its own: call a verb of that feature.",
   },
   outOfStore: {
@@ -78,7 +80,7 @@ export default tseslint.config(
     extends: [tseslint.configs.recommendedTypeChecked],
     languageOptions: { parserOptions: { projectService: true, tsconfigRootDir: import.meta.dirname } },
     rules: {
-      eqeqeq: 'error',
+      eqeqeq: ['error', 'always', { null: 'ignore' }],
       '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }],
       '@typescript-eslint/no-misused-promises': ['error', { checksVoidReturn: { arguments: false } }],
       '@typescript-eslint/no-namespace': ['error', { allowDeclarations: true }],
@@ -116,7 +118,7 @@ export default tseslint.config(
   },
   {
     files: ['**/*.{js,mjs}'],
-    languageOptions: { globals: { console: 'readonly', process: 'readonly', URL: 'readonly' } },
+    languageOptions: { globals: { console: 'readonly', process: 'readonly', URL: 'readonly', fetch: 'readonly' } },
   },
   { files: ['src/public/**/*.js'], languageOptions: { sourceType: 'script', globals: browserGlobals() } },
 
@@ -143,7 +145,11 @@ export default tseslint.config(
 function shut(folder, ...names) {
   const file = folder.endsWith('.ts') ? folder : `${folder}/*.ts`;
   const patterns = names.map((name) => doors[name]).filter(Boolean);
-  return { files: [file], ignores: ['**/*.spec.ts'], rules: { 'no-restricted-imports': ['error', { patterns }] } };
+  return {
+    files: [file],
+    ignores: ['**/*.spec.ts'],
+    rules: { '@typescript-eslint/no-restricted-imports': ['error', { patterns }] },
+  };
 }
 
 function inArithmetic() {

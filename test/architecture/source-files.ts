@@ -8,7 +8,11 @@ export interface Import {
   /** A project path like `file`, or the name of a package as written, as `node:path`. */
   target: string;
   isPackage: boolean;
+  /** True when the file takes nothing but types from there. */
+  isTypeOnly: boolean;
 }
+
+const typeOnlyImport = /^import (?:type [^;']*|\{(?:\s*type \w+,?)+\s*\}) from '[^']+';/gm;
 
 /** Every file below the folders, as paths from the top of the project. */
 export function filesIn(...folders: string[]): string[] {
@@ -29,12 +33,18 @@ export function textOf(file: string): string {
   return readFileSync(file, 'utf8');
 }
 
-/** What a file imports, exports again or loads lazily; types count too. */
+/** What a file imports, exports again or loads lazily. */
 export function importsOf(file: string): Import[] {
-  return preProcessFile(textOf(file), true, true).importedFiles.map(({ fileName }) => {
-    const path = projectPath(file, fileName);
-    return { file, target: path ?? fileName, isPackage: path === undefined };
+  const values = specifiersIn(textOf(file).replace(typeOnlyImport, ''));
+  return specifiersIn(textOf(file)).map((specifier) => {
+    const path = projectPath(file, specifier);
+    const isTypeOnly = !values.includes(specifier);
+    return { file, target: path ?? specifier, isPackage: path === undefined, isTypeOnly };
   });
+}
+
+function specifiersIn(text: string): string[] {
+  return preProcessFile(text, true, true).importedFiles.map(({ fileName }) => fileName);
 }
 
 function projectPath(file: string, specifier: string): string | undefined {
