@@ -1,19 +1,11 @@
 import { type DropEvidence, OPEN_DROP_STATES } from '@shared/contracts/drops';
 import type { BandJudgement } from '@shared/judging/band-judgement';
-import { type Actor, actorColumns } from '../actor';
-import { recordAudit } from '../audit/record-audit';
+import type { Actor } from '../actor';
 import type { Context } from '../context';
 import { describeEvidenceChange } from './describe-evidence-change';
 import { describeStanding } from './describe-standing';
-import {
-  type DropRow,
-  insertDrop,
-  insertDropEvent,
-  latestDataEvent,
-  listDropsOfBuild,
-  type NewDropEvent,
-  updateDrop,
-} from './drop-store';
+import { type DropRow, insertDrop, latestDataEvent, listDropsOfBuild, updateDrop } from './drop-store';
+import { recordDropEvent } from './record-drop-event';
 
 /** A loss as it was judged now. */
 export interface DropCase extends Pick<
@@ -64,7 +56,7 @@ function raise(context: Context, actor: Actor, { id: buildId, product }: Settled
     createdAt: now,
     updatedAt: now,
   });
-  record(context, actor, drop, 'raised', dropCase.sentence);
+  recordDropEvent(context, actor, drop, { kind: 'raised', text: dropCase.sentence });
 }
 
 function uphold(context: Context, actor: Actor, drop: DropRow, dropCase: DropCase): void {
@@ -78,8 +70,11 @@ function uphold(context: Context, actor: Actor, drop: DropRow, dropCase: DropCas
     ...(drop.state === 'withdrawn' && { state: 'new' }),
     ...(isVisible && { updatedAt: context.now() }),
   });
-  if (isReturning) record(context, actor, drop, 'raised', `The data show it again. ${dropCase.sentence}`);
-  else if (change !== null) record(context, actor, drop, 'evidence', change);
+  if (isReturning) {
+    recordDropEvent(context, actor, drop, { kind: 'raised', text: `The data show it again. ${dropCase.sentence}` });
+  } else if (change !== null) {
+    recordDropEvent(context, actor, drop, { kind: 'evidence', text: change });
+  }
 }
 
 /** A drop somebody closed with a reason keeps that state; its history says that the data changed. */
@@ -87,19 +82,7 @@ function withdraw(context: Context, actor: Actor, drop: DropRow, standing: strin
   if (latestDataEvent(context.db, drop.id)?.kind === 'withdrawn') return;
   const isOpen = OPEN_DROP_STATES.some((state) => state === drop.state);
   updateDrop(context.db, drop.id, { updatedAt: context.now(), ...(isOpen && { state: 'withdrawn' }) });
-  record(context, actor, drop, 'withdrawn', `The data no longer support it: ${standing}`);
-}
-
-function record(context: Context, actor: Actor, drop: DropRow, kind: NewDropEvent['kind'], text: string): void {
-  const { actorKind, actorName } = actorColumns(actor);
-  insertDropEvent(context.db, { dropId: drop.id, at: context.now(), actorKind, actorName, kind, text });
-  recordAudit(context, actor, {
-    teamId: drop.teamId,
-    action: kind === 'evidence' ? 'drop.updated' : `drop.${kind}`,
-    subjectKind: 'drop',
-    subjectId: drop.id,
-    summary: text,
-  });
+  recordDropEvent(context, actor, drop, { kind: 'withdrawn', text: `The data no longer support it: ${standing}` });
 }
 
 function placeKey({ stateId, band }: Pick<DropRow, 'stateId' | 'band'>): string {

@@ -1,3 +1,4 @@
+import { groupBy } from '@shared/collections/group-by';
 import type { DropEvidence } from '@shared/contracts/drops';
 import type { SwitchingStage } from '@shared/contracts/switching';
 import { formatFrequency } from '@shared/units/format-frequency';
@@ -44,12 +45,19 @@ function spreadOf(stage: SwitchingStage | undefined): string {
   return stage?.spreadPercent ? `${stage.spreadPercent} %` : 'none';
 }
 
-/** The last value stated for each parameter; before it, what the reference itself stated. */
+/** What was stated under each name, oldest first; before it, what the reference itself stated. */
 function parameterChanges(reference: Declaring, since: readonly Declaring[]): Change[] {
-  const stated = new Map(since.flatMap(({ parameters }) => parameters.map(({ name, value }) => [name, value])));
-  return [...stated].map(([what, now]) => ({
+  const stated = groupBy(
+    since.flatMap(({ parameters }) => parameters),
+    ({ name }) => name,
+  );
+  return [...stated].map(([what, parameters]) => ({
     what,
-    before: reference.parameters.find(({ name }) => name === what)?.value ?? NOT_DECLARED,
-    now,
+    before: valuesOf(reference.parameters.filter(({ name }) => name === what)) || NOT_DECLARED,
+    now: valuesOf(parameters),
   }));
+}
+
+function valuesOf(parameters: Declaring['parameters']): string {
+  return [...new Set(parameters.map(({ value }) => value))].join('; ');
 }

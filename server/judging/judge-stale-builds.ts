@@ -33,6 +33,12 @@ export async function judgeStaleBuilds(context: Context, held: HeldRun): Promise
   }
 }
 
+/** Judges what is not judged yet of a product, here and now. @throws whatever stops one of its builds */
+export function judgeProductNow(context: Context, productId: number): void {
+  const next = () => listStaleBuilds(context.db, productId)[0];
+  for (let build = next(); build !== undefined; build = next()) judgeOneBuild(context, build.id);
+}
+
 function judgeOrError(context: Context, buildId: number): JudgedBuildOutcome | Error {
   try {
     return judgeOneBuild(context, buildId);

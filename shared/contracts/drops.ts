@@ -44,6 +44,17 @@ export interface DropEvidence {
   harmonic: { stage: string; order: number; expectedHz: number } | null;
 }
 
+/** Query of the lists: `state` is `open`, or states with commas between; `owner` is `me`, `nobody` or a person's id. */
+export const DropQuery = z.object({
+  state: z
+    .string()
+    .transform((text) => (text === 'open' ? [...OPEN_DROP_STATES] : text.split(',')))
+    .pipe(z.array(z.enum(DROP_STATES)))
+    .optional(),
+  owner: z.union([z.enum(['me', 'nobody']), z.coerce.number().int().positive()]).optional(),
+});
+export type DropQuery = z.infer<typeof DropQuery>;
+
 /** Row of GET /api/v1/products/:key/drops?state and GET /api/teams/:team/drops?state&owner */
 export const DropSummary = z
   .object({
@@ -89,6 +100,7 @@ export const DropMove = z.object({
   note: z.string().trim().max(4000).default(''),
   fixedByBuildId: z.int().optional(),
 });
+export type DropMove = z.infer<typeof DropMove>;
 /** PUT /api/v1/drops/:id/owner */
 export const DropOwner = z.object({ personId: z.int().nullable() });
 /** POST /api/v1/drops/:id/notes */

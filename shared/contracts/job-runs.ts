@@ -24,3 +24,8 @@ export const JobRunView = z
   })
   .meta({ id: 'JobRun' });
 export type JobRunView = z.infer<typeof JobRunView>;
+
+/** POST /api/teams/:team/judge (lead): judges what is not judged yet of one product, or of all the team's. 202 */
+export const JudgeRequest = z.object({ product: z.string().optional() });
+export const JudgeStarted = z.object({ runs: z.array(JobRunView) });
+export type JudgeStarted = z.infer<typeof JudgeStarted>;

@@ -2,6 +2,11 @@ import type { BandJudgement } from '@shared/judging/band-judgement';
 import * as z from 'zod';
 import { DetectorName, Line, VerdictName } from './primitives';
 
+/** Query of the verdicts of one build. */
+export const BuildQuery = z.object({ hardware: z.string(), firmware: z.string() });
+/** POST /api/v1/products/:key/evaluate?wait: 202 with the run, or 200 with the run at its end */
+export const EvaluateQuery = z.object({ wait: z.enum(['true', 'false']).default('false') });
+
 /** GET /api/v1/products/:key/verdicts?hardware&firmware */
 export const VerdictsView = z
   .object({
@@ -35,9 +40,7 @@ export const VerdictsView = z
 export type VerdictsView = z.infer<typeof VerdictsView>;
 
 /** GET /api/v1/products/:key/gate?hardware&firmware&targetMarginDb&format */
-export const GateQuery = z.object({
-  hardware: z.string(),
-  firmware: z.string(),
+export const GateQuery = BuildQuery.extend({
   targetMarginDb: z.coerce.number().min(0).max(40).optional(),
   format: z.enum(['json', 'junit']).default('json'),
 });
