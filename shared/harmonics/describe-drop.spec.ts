@@ -46,6 +46,11 @@ describe('describeDrop', () => {
     expect(describeDrop(facts({ ...sameSwitching, referenceFrequencyHz: 260_000 }))).not.toContain('harmonic');
   });
 
+  it('does not say that a harmonic rose which fell, as on a falling limit', () => {
+    const text = describeDrop(facts({ ...sameSwitching, levelChangeDb: -0.5 }));
+    expect(text).not.toContain('harmonic');
+  });
+
   it.each([
     ['nothing is declared', { buildSwitching: [] }],
     ['the reference declares nothing', { referenceSwitching: [] }],

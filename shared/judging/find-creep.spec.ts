@@ -27,8 +27,8 @@ describe('cusumLoss', () => {
 describe('findCreep', () => {
   const creeping = builds(Array.from({ length: 15 }, (_, index) => 10 - 0.3 * index));
 
-  it('gives slope and builds left to the target of a straight loss (by hand: 5.8 dB left, 1.8 dB above target)', () => {
-    const creep = findCreep(creeping, 10, 0.7, 4);
+  it('gives slope and builds left to the target of a straight loss (by hand: 5.8 dB left, 1.7 dB above target, 5.67 builds)', () => {
+    const creep = findCreep(creeping, 10, 0.7, 4.1);
     expect(creep?.slopeDbPerBuild).toBeCloseTo(-0.3, 12);
     expect(creep?.buildsToTarget).toBe(6);
     expect(creep?.startBuildId).toBe(3);

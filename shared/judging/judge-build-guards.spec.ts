@@ -44,6 +44,11 @@ describe('judgeBuild refuses', () => {
     expect(judgeOne({ build }).buildRuns).toBe(1);
   });
 
+  it('to count one reading of the reference stored twice as two runs', () => {
+    const reference = [1, 2].map((buildId) => aRun({ buildId, readingHash: 'same' }));
+    expect(judgeOne({ reference, history: reference }).referenceRuns).toBe(1);
+  });
+
   it('a first build, whose margin is stated all the same', () => {
     const judgement = judgeOne({
       reference: [],
@@ -88,6 +93,16 @@ describe('judgeBuild and masked points', () => {
     const judgement = judgeOne({ reference, history: reference, build: [aRun({ marginDb: 1, buildId: 9 })] });
     expect(judgement.verdict).toBe('lost');
     expect(judgement.remarks.map(({ code }) => code)).toContain('referenceMasked');
+  });
+
+  it('holds nothing that is hidden in this build', () => {
+    expect(judgeOne({ build: [aRun({ marginDb: 8, buildId: 9, backgroundLevelDbuv: 55 })] }).verdict).toBe('cannotSay');
+  });
+
+  it('calls a gain into the background: it can only be larger', () => {
+    const judgement = judgeOne({ build: [aRun({ marginDb: 16, buildId: 9, backgroundLevelDbuv: 47 })] });
+    expect(judgement.verdict).toBe('gained');
+    expect(judgement.remarks.map(({ code }) => code)).toContain('buildMasked');
   });
 
   it('holds nothing that is hidden on both sides', () => {

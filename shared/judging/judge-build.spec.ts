@@ -75,6 +75,16 @@ describe('judgeBuild', () => {
     expect((move?.limitChangeDb ?? 0) - (move?.levelChangeDb ?? 0)).toBeCloseTo(differenceDb ?? 0, 10);
   });
 
+  it('takes two worst points within half an RBW for one line', () => {
+    const near = judgeOne({ build: [aRun({ marginDb: 2, frequencyHz: 160_400, buildId: 9 })] });
+    expect(near.move?.moved).toBe(false);
+  });
+
+  it('keeps runs of the same name of two builds apart', () => {
+    const reference = runsOf([8.3, 7.8, 8.1, 7.6, 8.2], 1, { run: 'morning' });
+    expect(judgeOne({ reference, history: reference }).referenceRuns).toBe(5);
+  });
+
   it('averages the sweeps of one run and counts the run once', () => {
     const build = [6, 8].map((marginDb) => aRun({ marginDb, buildId: 9, run: 'morning' }));
     expect(judgeOne({ build })).toMatchObject({ buildRuns: 1, meanMarginDb: 7 });
@@ -84,6 +94,8 @@ describe('judgeBuild', () => {
     const reference = runsOf([-0.5, -0.4, -0.6, -0.5, -0.5]);
     const judgement = judgeOne({ reference, history: reference, build: [aRun({ marginDb: -0.5, buildId: 9 })] });
     expect(judgement).toMatchObject({ verdict: 'held', overLimit: true, underTarget: true });
+    const onIt = judgeOne({ reference, history: reference, build: [aRun({ marginDb: 0, buildId: 9 })] });
+    expect(onIt).toMatchObject({ overLimit: false, underTarget: true });
   });
 
   it('gives the chance to meet the limit only to a laboratory that entered its budget (JCGM 106: 2.8 dB at u = 1.7 dB)', () => {
