@@ -2,7 +2,7 @@ import type { Detector } from '@shared/detectors/detectors';
 import { bandsFor } from '@shared/limits/bands';
 import { cellEdgesHz } from '@shared/limits/cells';
 import { findLimitSet, lineForDetector } from '@shared/limits/limit-sets';
-import { prepareGrid, sweepMargins } from '@shared/traces/margins';
+import { type MarginPoint, prepareGrid, sweepMargins } from '@shared/traces/margins';
 import { demoScenario } from './scenario';
 import type { DemoBuild, DemoProduct, DemoScenario } from './scenario-types';
 import { DEMO_RASTER, createDemoSimulator } from './simulate-session';
@@ -28,25 +28,22 @@ function buildOf(product: DemoProduct, hardware: string, firmware: string): Demo
   return build;
 }
 
-/** Worst margin of a build in a band, mean of its runs, over both lines; and where it is in the first run. */
-function worst(key: string, revisions: string, state: string, detector: Detector, band: string) {
+/** Worst margin of a build's first run in a band, over both lines, and where it is. */
+function worst(key: string, revisions: string, state: string, detector: Detector, band: string): MarginPoint {
   const product = productOf(key);
   const [hardware, firmware] = revisions.split(' ');
   const build = buildOf(product, hardware, firmware);
   const set = findLimitSet(product.limitSetKey);
   const limit = set && lineForDetector(set, detector);
-  if (limit === undefined) throw new Error(`no limit for ${detector}`);
+  const session = build.sessions.find((entry) => entry.kind === 'product' && entry.state === state);
+  if (limit === undefined || session === undefined) throw new Error(`nothing measured of ${revisions} ${state}`);
   const grid = prepareGrid(frequenciesHz, limit, bandsFor(limit), cellEdgesHz());
-  const runs = build.sessions.filter((session) => session.kind === 'product' && session.state === state);
-  const points = runs.map((session) => {
-    const levels = simulator.simulateLevels(product, build, session);
-    const found = (['L', 'N'] as const).map(
-      (line) => sweepMargins(levels[line][detector], grid).bands.find((entry) => entry.band === band)?.worst,
-    );
-    return found.reduce((a, b) => ((a?.marginDb ?? Infinity) < (b?.marginDb ?? Infinity) ? a : b));
+  const levels = simulator.simulateLevels(product, build, session);
+  const points = (['L', 'N'] as const).flatMap((line) => {
+    const found = sweepMargins(levels[line][detector], grid).bands.find((entry) => entry.band === band)?.worst;
+    return found ? [found] : [];
   });
-  const marginDb = points.reduce((sum, point) => sum + (point?.marginDb ?? NaN), 0) / points.length;
-  return { marginDb, frequencyHz: points[0]?.frequencyHz ?? NaN };
+  return points.reduce((least, point) => (point.marginDb < least.marginDb ? point : least));
 }
 
 const LOW = '0.15-0.5 MHz';

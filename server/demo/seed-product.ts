@@ -1,0 +1,124 @@
+import { SweepTags } from '@shared/contracts/sweeps';
+import { editBuild } from '../builds/edit-build';
+import { findBuildOf } from '../builds/find-build';
+import { findOrCreateBuild } from '../builds/find-or-create-build';
+import type { Context } from '../context';
+import { judgeProductNow } from '../judging/judge-stale-builds';
+import { chooseReference } from '../products/choose-reference';
+import { createProduct } from '../products/edit-product';
+import { createState } from '../products/edit-state';
+import { type FoundProduct, findProduct } from '../products/find-product';
+import { shareProduct } from '../products/share-product';
+import { importSweep } from '../sweeps/import-sweep';
+import type { DemoBuild, DemoProduct, DemoScenario, DemoSession } from './scenario-types';
+import { seedDropAction } from './seed-drop-action';
+import { demoActor, demoActorWith, demoTeam } from './seed-people';
+import { firmwareOf } from './simulate-condition';
+import type { DemoSimulator } from './simulate-session';
+
+/** The judging job runs a while after the last sweep of the day. */
+const JUDGED_AFTER_MS = 2 * 3600_000;
+const DAY_MS = 24 * 3600_000;
+
+/** Something that happens to a product at a time. */
+interface Happening {
+  at: number;
+  happen(context: Context): void;
+}
+
+/** Lives a product's history through, in the order of time, with the verbs that people and jobs use. */
+export function seedProduct(
+  context: Context,
+  scenario: DemoScenario,
+  product: DemoProduct,
+  simulator: DemoSimulator,
+): void {
+  const lead = demoActorWith(context, scenario, product.teamKey, 'lead');
+  const technician = demoActorWith(context, scenario, product.teamKey, 'technician');
+  const found = (at: Context): FoundProduct => findProduct(at, lead, product.key, product.teamKey, 'products.edit');
+
+  const happenings: Happening[] = product.builds.flatMap((build) => [
+    { at: build.builtAtMs, happen: (at) => seedBuild(at, found(at), product, build) },
+    ...build.sessions.map((session) => ({
+      at: session.takenAtMs,
+      happen: (at: Context) => importSession(at, build, session),
+    })),
+    { at: lastSweepAt(build) + JUDGED_AFTER_MS, happen: (at) => judgeProductNow(at, found(at).product.id) },
+  ]);
+  for (const choice of product.references) {
+    happenings.push({
+      at: choice.chosenAtMs,
+      happen: (at) => {
+        const { build } = findBuildOf(at, found(at).product.id, choice.build.hardware, choice.build.firmware);
+        chooseReference(at, demoActor(at, choice.chosenByEmail), found(at), {
+          buildId: build.id,
+          reason: choice.reason,
+        });
+        judgeProductNow(at, found(at).product.id);
+      },
+    });
+  }
+  for (const action of product.dropActions) {
+    const builtAt = product.builds.find((build) => isSame(build, action.build))?.builtAtMs ?? 0;
+    const earliest = builtAt + action.afterDays * DAY_MS;
+    // "Fixed" must name a judged build that shows it.
+    const fixedBy = action.fixedBy && product.builds.find((build) => isSame(build, action.fixedBy ?? build));
+    const at = Math.max(earliest, fixedBy ? lastSweepAt(fixedBy) + 2 * JUDGED_AFTER_MS : 0);
+    happenings.push({ at, happen: (then) => seedDropAction(then, found(then).product, action) });
+  }
+
+  const { key, name, description, limitSetKey, targetMarginDb } = product;
+  const first = at(context, Math.min(...product.builds.map(({ builtAtMs }) => builtAtMs)) - DAY_MS);
+  createProduct(first, lead, demoTeam(context, product.teamKey), {
+    key,
+    name,
+    description,
+    limitSetKey,
+    targetMarginDb,
+  });
+  for (const { operation: _operation, ...state } of product.states)
+    createState(first, lead, found(first).product, state);
+  if (product.sharedWith.length > 0) shareProduct(first, lead, found(first), product.sharedWith);
+  for (const { at: when, happen } of happenings.sort((a, b) => a.at - b.at)) happen(at(context, when));
+
+  function importSession(then: Context, build: DemoBuild, session: DemoSession): void {
+    const { fileName, bytes, tags } = simulator.simulateSession(product, build, session);
+    for (const tag of tags) importSweep(then, technician, { bytes, fileName, tags: SweepTags.parse(tag) });
+  }
+}
+
+function seedBuild(context: Context, { product }: FoundProduct, demo: DemoProduct, build: DemoBuild): void {
+  const engineer = { kind: 'job', name: 'demo' } as const;
+  const firmware = firmwareOf(demo, build);
+  const hardware = demo.hardwareRevisions.find((revision) => revision.name === build.hardware);
+  const created = findOrCreateBuild(context, engineer, product, {
+    hardware: build.hardware,
+    firmware: build.firmware,
+    builtAt: build.builtAtMs,
+  });
+  editBuild(context, engineer, product, created.id, {
+    commit: firmware.commit,
+    firmwareNotes: firmware.notes,
+    hardwareNotes: hardware?.notes ?? '',
+    notes: build.changes.join(', '),
+    switching: Object.entries(firmware.control).map(([stage, { frequencyHz, spreading }]) => ({
+      stage,
+      frequencyHz,
+      spreadPercent: spreading?.peakToPeakPercent ?? 0,
+    })),
+    parameters: build.changes.map((change) => ({ name: 'changed', value: change })),
+  });
+}
+
+function lastSweepAt(build: DemoBuild): number {
+  return Math.max(build.builtAtMs, ...build.sessions.map(({ takenAtMs }) => takenAtMs));
+}
+
+function isSame(build: { hardware: string; firmware: string }, other: { hardware: string; firmware: string }): boolean {
+  return build.hardware === other.hardware && build.firmware === other.firmware;
+}
+
+/** The context at another time. */
+function at(context: Context, when: number): Context {
+  return { ...context, now: () => when };
+}
