@@ -28,6 +28,6 @@ export const BenchInput = z.object({
   receiver: z.string().max(400).default(''),
   notes: Notes.default(''),
 });
-export const BenchPatch = patchOf(BenchInput.omit({ key: true }))
-  .partial()
-  .extend({ isArchived: z.boolean().optional() });
+export type BenchInput = z.infer<typeof BenchInput>;
+export const BenchPatch = patchOf(BenchInput.omit({ key: true })).extend({ isArchived: z.boolean().optional() });
+export type BenchPatch = z.infer<typeof BenchPatch>;
