@@ -1,4 +1,5 @@
 import { RECEIVER_BAND_B } from '../detectors/receiver-bands';
+import { firstIndexAtOrAbove } from './frequency-grid';
 
 /** A step up to this share of the frequency counts as measured throughout: sweeps with logarithmic steps. */
 const DENSE_STEP_SHARE = 0.02;
@@ -19,8 +20,10 @@ export function coveredFraction(frequenciesHz: Float64Array, fromHz: number, toH
   const halfBandwidthHz = RECEIVER_BAND_B.bandwidthHz / 2;
   let coveredHz = 0;
   let coveredToHz = fromHz;
-  for (let i = 0; i < frequenciesHz.length; i++) {
+  const lastBelow = Math.max(0, firstIndexAtOrAbove(frequenciesHz, fromHz) - 1);
+  for (let i = lastBelow; i < frequenciesHz.length; i++) {
     const frequencyHz = frequenciesHz[i];
+    if (frequencyHz - halfBandwidthHz >= toHz) break;
     const isLast = i + 1 === frequenciesHz.length;
     const stepHz = isLast ? Infinity : frequenciesHz[i + 1] - frequencyHz;
     const dense = stepHz <= Math.max(2 * halfBandwidthHz, DENSE_STEP_SHARE * frequencyHz);

@@ -1,8 +1,9 @@
 import fc from 'fast-check';
+import type { FrameTrace } from './frames';
 import { decodeFrames, encodeFrames } from './frames';
 
 const grids = [Float64Array.of(150_000, 154_500, 159_000), Float64Array.of(1e6, 2e6)];
-const traces = [
+const traces: FrameTrace<{ name: string; run: number | null }>[] = [
   { grid: 0, meta: { name: 'C1 / 2.4.1', run: 7 }, levelsDbuv: Float32Array.of(40.1, 41.2, 39.9) },
   { grid: 1, meta: { name: 'before – “first” µ', run: null }, levelsDbuv: Float32Array.of(30, 31) },
 ];

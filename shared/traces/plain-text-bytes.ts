@@ -27,7 +27,8 @@ export function plainTextBytes(given: Uint8Array): PlainText {
       advice: 'Export the sweep again.',
     });
   }
-  for (const byte of given.subarray(0, BYTES_LOOKED_AT)) {
+  for (let i = 0; i < given.length && i < BYTES_LOOKED_AT; i++) {
+    const byte = given[i];
     // Tab, line feed, form feed, carriage return and the end-of-file mark of old systems are all that text needs.
     if (byte >= 32 || (byte >= 9 && byte <= 13) || byte === 26) continue;
     throw new ReadingError({

@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { readDelimited } from './read-delimited';
 import { ReadingError } from './reading-error';
 
@@ -326,6 +327,63 @@ describe('readDelimited', () => {
       ['UTF-16', new Uint8Array(Buffer.from(heading + table(), 'utf16le'))],
     ])('refuses %s as binary', (_name, content) => {
       expect(faultOf(content).found).toContain('a binary file');
+    });
+
+    it('reads what is written or names a fault, whatever single byte of a file is damaged', () => {
+      const sound = bytesOf(heading + table());
+      const offset = fc.integer({ min: heading.length, max: sound.length - 1 });
+      fc.assert(
+        fc.property(offset, fc.integer({ min: 0, max: 255 }), (at, byte) => {
+          const damaged = sound.slice();
+          damaged[at] = byte;
+          const text = Buffer.from(damaged.subarray(heading.length)).toString('latin1');
+          const rows = text
+            .trim()
+            .split('\n')
+            .map((row) => row.split(','));
+          try {
+            const { frequenciesHz, traces } = readDelimited(damaged);
+            expect([...frequenciesHz]).toEqual(rows.map(([hz]) => Number(hz)));
+            // A written -0 is read as 0.
+            expect([...traces[0].levelsDbuv]).toEqual(rows.map(([, level]) => Math.fround(Number(level)) + 0));
+          } catch (error) {
+            if (!(error instanceof ReadingError)) throw error;
+          }
+        }),
+        { numRuns: 2000 },
+      );
+    });
+
+    it('reads or refuses any bytes with a fault of its own', () => {
+      const words = fc.constantFrom(
+        '1',
+        '0.15',
+        '45,3',
+        ';',
+        ',',
+        '\t',
+        '\n',
+        'Hz',
+        'dBuV',
+        'f',
+        ' ',
+        '"',
+        'e',
+        '-',
+        '#',
+        ':',
+      );
+      const text = fc.array(words, { maxLength: 200 }).map((parts) => bytesOf(parts.join('')));
+      fc.assert(
+        fc.property(fc.oneof(text, fc.uint8Array({ maxLength: 400 })), (bytes) => {
+          try {
+            readDelimited(bytes, { levelUnit: 'dBuV' });
+          } catch (error) {
+            if (!(error instanceof ReadingError)) throw error;
+          }
+        }),
+        { numRuns: 1000 },
+      );
     });
 
     it('advises what to do', () => {

@@ -79,12 +79,12 @@ export function scanColumns(bytes: Uint8Array, layout: ColumnLayout, use: Column
     }
     for (let column = 0; column < columnCount; column++) {
       let byte = bytes[position];
-      while (byte === SPACE) byte = bytes[++position];
       let negative = false;
-      if (byte === MINUS) {
-        negative = true;
-        byte = bytes[++position];
-      } else if (byte === PLUS) byte = bytes[++position];
+      if (byte < DIGIT_ZERO) {
+        while (byte === SPACE) byte = bytes[++position];
+        negative = byte === MINUS;
+        if (negative || byte === PLUS) byte = bytes[++position];
+      }
 
       const digitsOffset = position;
       // Overflows beyond 9 digits; such a mantissa is read again below.

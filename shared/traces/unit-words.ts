@@ -15,9 +15,9 @@ const OTHER_LEVEL_WORD = /(?<![a-z])(db\s*\(?\s*[a-z][a-z/]*\)?)|[[(]\s*([um]?[v
 /** A level unit as a file states it: one that is read, plain dB (a ratio, no level), or the text of one that is not read. */
 export type StatedLevelUnit = LevelUnit | 'dB' | { readonly other: string };
 
-/** Both mu letters of Unicode are taken for the micro of units. */
+/** Both mu letters of Unicode are taken for the micro of units; runs of blanks become one. */
 function withPlainMicro(text: string): string {
-  return text.replace(/[\u00b5\u03bc]/g, 'u');
+  return text.replace(/[\u00b5\u03bc]/g, 'u').replace(/\s+/g, ' ');
 }
 
 /** Finds a frequency unit in a header cell or a preamble value, for example "Frequency [MHz]". */

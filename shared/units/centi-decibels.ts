@@ -3,7 +3,7 @@ const HIGHEST_CENTI_DB = 32767;
 
 /**
  * Turns a margin into whole hundredths of a decibel, never above the margin itself.
- * Formula: floor(100 * marginDb), held within +-327.67 dB.
+ * Formula: the largest whole n with n / 100 <= marginDb, held within +-327.67 dB.
  * @param marginDb margin in dB, any finite number
  * @returns margin in centi-dB, -32767 to 32767 (-32768 is kept free for "not measured")
  * Source: our own definition: a stored margin may be too small by 0.01 dB, but never too large.
@@ -11,9 +11,9 @@ const HIGHEST_CENTI_DB = 32767;
  */
 export function marginToCentiDb(marginDb: number): number {
   const nearest = Math.round(marginDb * 100);
-  // 0.29 * 100 is 28.999999999999996: a margin that was written with two decimals must come back as written.
-  const floored = nearest / 100 === marginDb ? nearest : Math.floor(marginDb * 100);
-  return Math.min(HIGHEST_CENTI_DB, Math.max(LOWEST_CENTI_DB, floored));
+  // Comparing after the division gives a margin of two decimals back as written: 0.29 * 100 is 28.999999999999996.
+  const centiDb = nearest / 100 <= marginDb ? nearest : nearest - 1;
+  return Math.min(HIGHEST_CENTI_DB, Math.max(LOWEST_CENTI_DB, centiDb));
 }
 
 /**
