@@ -23,7 +23,7 @@ import { ChangeDetectionStrategy, Component, computed, input } from '@angular/co
       display: block;
       height: 14px;
       border-radius: 4px;
-      background: var(--sl-surface-high);
+      background: var(--sl-surface-highest);
       animation: breathe 1.6s ease-in-out infinite;
     }
     @keyframes breathe {

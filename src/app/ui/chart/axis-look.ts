@@ -3,6 +3,11 @@ import { FrequencyRange, frequencyTicksHz, tickLabel } from './frequency-scale';
 
 export const CHART_FONT = "'Noto Sans', sans-serif";
 
+/** About how wide a text of 12 px is drawn. */
+export function textWidthPx(text: string): number {
+  return 7 * text.length + 8;
+}
+
 /** What all axes share: 12 px labels, hairline grid. */
 export function axisLook(palette: ChartPalette) {
   return {

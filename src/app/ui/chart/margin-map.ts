@@ -120,10 +120,11 @@ export class MarginMap {
     const cursor = this.cursor();
     const box = this.box();
     if (!cursor || !box) return null;
+    const isLeftHalf = box.leftPx < MARGIN_MAP_MARGINS.left + this.plotPx() / 2;
     const build = this.builds()[cursor.build];
     const marginDb = this.cells()[cursor.build][cursor.cell];
     return {
-      xPx: box.leftPx + box.widthPx / 2,
+      xPx: isLeftHalf ? box.leftPx + box.widthPx : box.leftPx,
       yPx: box.topPx,
       title: marginDb === null ? 'not measured' : `${formatDecibels(marginDb)} of margin${this.standing(marginDb)}`,
       subtitle: `${cellText(cursor.cell, this.edgesHz())}, build ${buildLabel(build)}`,

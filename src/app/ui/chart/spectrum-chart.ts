@@ -18,7 +18,7 @@ import { traceLooks } from './trace-look';
 /** The narrowest zoom: one part in two hundred of the frequency, about a receiver's bandwidth at 2 MHz. */
 const NARROWEST_RATIO = 1.005;
 /** Half width, in columns of the picture, within which the pointer finds a peak. */
-const SNAP_COLUMNS = 4;
+const SNAP_COLUMNS = 6;
 
 /** Sweeps over limit lines on a log frequency axis: hover reads, click pins, drag zooms, double click restores. */
 @Component({

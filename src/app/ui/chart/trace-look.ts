@@ -10,7 +10,7 @@ export interface TraceLook {
   symbol: 'circle' | 'triangle' | 'rect' | 'diamond' | 'roundRect';
 }
 
-const DASHES = { PK: 'solid', QP: [8, 4], AV: [2, 3] } as const;
+const DASHES = { PK: 'solid', QP: [14, 4], AV: [2, 3] } as const;
 const SYMBOLS: Record<string, TraceLook['symbol']> = {
   L: 'circle',
   N: 'triangle',

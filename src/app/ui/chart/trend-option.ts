@@ -51,8 +51,10 @@ export function trendOption(scene: TrendScene): EChartsCoreOption {
       axisLabel: { ...look.axisLabel, formatter: '{value} dB' },
     },
     series: [
-      { type: 'line', data: [], silent: true, z: 1, markArea: overArea(scene), markLine: guides(scene) },
-      ...series.flatMap((one, i) => [spreadBars(one, looks[i]), marginLine(one, looks[i], range)]),
+      { type: 'line', data: [], silent: true, z: 1, markArea: overArea(scene) },
+      ...(isCrowded(range) ? [] : series.map((one, i) => spreadBars(one, looks[i]))),
+      ...series.map((one, i) => marginLine(one, looks[i], range)),
+      { type: 'line', data: [], silent: true, z: 6, markLine: guides(scene) },
       dropFlags(scene),
       buildStrip(builds, range, margins.toDb, palette),
     ],
@@ -67,11 +69,16 @@ function marginLine({ points }: TrendSeries, { colour, symbol }: TrendLook, { fr
     connectNulls: false,
     showAllSymbol: true,
     symbol,
-    symbolSize: to - from > 120 ? 3.5 : 6.5,
+    symbolSize: isCrowded({ from, to }) ? 3.5 : 6.5,
     z: 5,
     lineStyle: { color: colour, width: 1.6 },
     itemStyle: { color: colour },
   };
+}
+
+/** Builds stand too close for spread bars and full-size markers. */
+function isCrowded({ from, to }: BuildRange): boolean {
+  return to - from > 120;
 }
 
 /** From the lowest to the highest run of a build, as an upright bar with short ends. */
@@ -108,8 +115,8 @@ function dropFlags({ builds, series, range, margins, palette }: TrendScene) {
     data,
     silent: true,
     z: 7,
-    symbolSize: 14,
-    symbolOffset: [0, 15],
+    symbolSize: isCrowded(range) ? 9 : 14,
+    symbolOffset: [0, isCrowded(range) ? 10 : 15],
     ...verdictSymbol('drop', palette),
   };
 }
