@@ -1,5 +1,5 @@
 import type { Role } from '@shared/access/roles';
-import { and, asc, eq } from 'drizzle-orm';
+import { and, asc, count, eq, isNull } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
 import { memberships, people, teams } from '../db/schema';
 
@@ -42,4 +42,14 @@ export function listMembershipsOfAll(db: Database) {
     .where(eq(teams.isArchived, false))
     .orderBy(asc(teams.name))
     .all();
+}
+
+export function updatePerson(db: Database, id: number, change: Partial<typeof people.$inferInsert>): void {
+  db.update(people).set(change).where(eq(people.id, id)).run();
+}
+
+/** How many administrators can sign in. */
+export function countAdministrators(db: Database): number {
+  const isAble = and(eq(people.isAdministrator, true), isNull(people.disabledAt));
+  return db.select({ administrators: count() }).from(people).where(isAble).get()?.administrators ?? 0;
 }

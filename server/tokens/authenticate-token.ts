@@ -1,13 +1,14 @@
 import type { TokenActor } from '../actor';
 import type { Context } from '../context';
 import { ServiceError } from '../service-error';
+import { teamById } from '../teams/find-team';
 import { findToken, markTokenUsed } from './token-store';
 import { isSecret, parseToken } from './token-secret';
 
 /** `lastUsedAt` is written at most this often, so that a busy bench does not write with every read. */
 const LAST_USE_STEP_MS = 60_000;
 
-/** @throws ServiceError `signedOut` for a token that is malformed, unknown, wrong or revoked, alike in every case */
+/** @throws ServiceError `signedOut` for a token that is malformed, unknown, wrong or revoked, or whose team is archived, alike in every case */
 export function authenticateToken(context: Context, text: string): TokenActor {
   const parsed = parseToken(text);
   const token = parsed && findToken(context.db, parsed.id);
@@ -15,7 +16,8 @@ export function authenticateToken(context: Context, text: string): TokenActor {
     parsed === undefined ||
     token === undefined ||
     token.revokedAt !== null ||
-    !isSecret(parsed.secret, token.secretHash)
+    !isSecret(parsed.secret, token.secretHash) ||
+    teamById(context, token.teamId).isArchived
   ) {
     throw new ServiceError('signedOut', 'the team token is not valid: it is mistyped or was revoked');
   }

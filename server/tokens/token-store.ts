@@ -1,6 +1,6 @@
-import { eq } from 'drizzle-orm';
+import { desc, eq, isNull } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
-import { teamTokens } from '../db/schema';
+import { people, teamTokens } from '../db/schema';
 
 export type TeamToken = typeof teamTokens.$inferSelect;
 
@@ -14,4 +14,19 @@ export function insertToken(db: Database, token: typeof teamTokens.$inferInsert)
 
 export function markTokenUsed(db: Database, id: number, at: number): void {
   db.update(teamTokens).set({ lastUsedAt: at }).where(eq(teamTokens.id, id)).run();
+}
+
+export function markTokenRevoked(db: Database, id: number, at: number): void {
+  db.update(teamTokens).set({ revokedAt: at }).where(eq(teamTokens.id, id)).run();
+}
+
+/** Tokens of a team with who made them: those in force first, then newest first. */
+export function listTokenRows(db: Database, teamId: number): { token: TeamToken; createdByName: string }[] {
+  return db
+    .select({ token: teamTokens, createdByName: people.name })
+    .from(teamTokens)
+    .innerJoin(people, eq(people.id, teamTokens.createdBy))
+    .where(eq(teamTokens.teamId, teamId))
+    .orderBy(desc(isNull(teamTokens.revokedAt)), desc(teamTokens.id))
+    .all();
 }

@@ -15,3 +15,7 @@ export const AuditEntryView = z.object({
 export type AuditEntryView = z.infer<typeof AuditEntryView>;
 export const AuditPage = z.object({ entries: z.array(AuditEntryView), nextBefore: z.int().nullable() });
 export type AuditPage = z.infer<typeof AuditPage>;
+export const AuditQuery = z.object({
+  before: z.coerce.number().int().positive().optional().describe('`nextBefore` of the page before'),
+  limit: z.coerce.number().int().min(1).max(500).default(100),
+});

@@ -47,7 +47,7 @@ export const PendingInvitation = z.object({
 export type PendingInvitation = z.infer<typeof PendingInvitation>;
 export const MembersView = z.object({ members: z.array(MemberView), invitations: z.array(PendingInvitation) });
 export type MembersView = z.infer<typeof MembersView>;
-/** POST /api/teams/:team/invitations */
+/** POST /api/teams/:team/invitations; POST .../invitations/:id/resend mails a new link, DELETE .../invitations/:id revokes */
 export const InvitationInput = z.object({ email: Email, role: z.enum(ROLES) });
 /** PATCH /api/teams/:team/members/:personId; DELETE removes */
 export const RoleChange = z.object({ role: z.enum(ROLES) });
@@ -77,7 +77,7 @@ export const InstallationTeam = TeamView.extend({ memberCount: z.int(), productC
 export type InstallationTeam = z.infer<typeof InstallationTeam>;
 export const TeamArchive = z.object({ isArchived: z.boolean() });
 
-/** Installation: GET /api/installation/people, PATCH /api/installation/people/:id, PUT .../memberships/:team */
+/** Installation: GET /api/installation/people, PATCH /api/installation/people/:id, PUT {role} or DELETE .../people/:id/memberships/:team */
 export const PersonView = z.object({
   id: z.int(),
   name: z.string(),
