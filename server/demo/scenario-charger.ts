@@ -78,7 +78,6 @@ export function chargerProduct(nowMs: number): DemoProduct {
     dropActions: [
       {
         build: { hardware: 'C2', firmware: '4.0.0' },
-        state: null,
         band: null,
         ownerEmail: 'ivo.brasted@brackenholt.example',
         afterDays: 4,

@@ -46,7 +46,6 @@ export function driveProduct(nowMs: number): DemoProduct {
     dropActions: [
       {
         build: { hardware: 'M2', firmware: '2.3.0' },
-        state: null,
         band: null,
         ownerEmail: 'edric.salloway@brackenholt.example',
         afterDays: 9,

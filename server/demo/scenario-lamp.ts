@@ -38,7 +38,6 @@ export function lampProduct(nowMs: number): DemoProduct {
     dropActions: [
       {
         build: { hardware: 'L4', firmware: '1.6.0' },
-        state: null,
         band: null,
         ownerEmail: 'edric.salloway@brackenholt.example',
         afterDays: 3,
@@ -48,7 +47,6 @@ export function lampProduct(nowMs: number): DemoProduct {
       },
       {
         build: { hardware: 'L4', firmware: '1.6.0' },
-        state: null,
         band: null,
         ownerEmail: 'edric.salloway@brackenholt.example',
         afterDays: 18,

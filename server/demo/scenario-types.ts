@@ -145,10 +145,9 @@ export interface ReferenceChoice {
   reason: string;
 }
 
-/** What is done about the drop of a build; state and band null stand for every drop of the build. */
+/** What is done about the drops of a build; band null stands for every band. */
 export interface DropAction {
   build: BuildName;
-  state: string | null;
   band: string | null;
   ownerEmail: string;
   /** Days after the build on which it happens. */

@@ -8,6 +8,9 @@ import type { SpreadShapes } from './spread-shapes';
 import { stageHarmonics } from './stage-harmonics';
 import type { SwitchingStage } from './switching-stage';
 
+// NOTE: taken once: looking Math up in every turn of these loops is ten times slower in a test runner's sandbox.
+const { abs, max, min, sqrt } = Math;
+
 /** Equally spaced tuned frequencies. */
 export interface FrequencyRaster {
   startHz: number;
@@ -81,13 +84,13 @@ function stageSpectrum(
     const excursionHz = excursionRatio * harmonic.frequencyHz;
     const shape = stage.spreading === null ? null : shapes(excursionHz, stage.spreading);
     const reachHz = FILTER_REACH_HZ + (shape === null ? 0 : excursionHz / 2);
-    const first = Math.max(0, Math.ceil((harmonic.frequencyHz - reachHz - raster.startHz) / raster.stepHz));
-    const last = Math.min(
+    const first = max(0, Math.ceil((harmonic.frequencyHz - reachHz - raster.startHz) / raster.stepHz));
+    const last = min(
       raster.pointCount - 1,
       Math.floor((harmonic.frequencyHz + reachHz - raster.startHz) / raster.stepHz),
     );
     for (let point = first; point <= last; point++) {
-      const offsetHz = Math.abs(raster.startHz + raster.stepHz * point - harmonic.frequencyHz);
+      const offsetHz = abs(raster.startHz + raster.stepHz * point - harmonic.frequencyHz);
       const { peak, quasiPeak, average } = harmonic.nodeV;
       if (shape === null) {
         const weight = gaussianResponse(offsetHz) * PEAK_VOLTS_TO_RMS_MICROVOLTS;
@@ -119,7 +122,7 @@ function weightsAt(shape: SpreadShape, excursionHz: number, offsetHz: number): S
     if (offsetsHz[middle] <= position) below = middle;
     else above = middle;
   }
-  const part = Math.min(1, (position - offsetsHz[below]) / (offsetsHz[above] - offsetsHz[below]));
+  const part = min(1, (position - offsetsHz[below]) / (offsetsHz[above] - offsetsHz[below]));
   const mix = (low: number, high: number): number => low + part * (high - low);
   return {
     peak: mix(readings[below].peak, readings[above].peak),
@@ -135,9 +138,9 @@ function addLine(spectra: LineSpectra, point: number, peak: number, quasiPeak: n
 }
 
 function addPlateau(spectra: LineSpectra, point: number, peak: number, quasiPeak: number, average: number): void {
-  spectra.PK[point] = Math.max(spectra.PK[point], peak);
-  spectra.QP[point] = Math.min(spectra.PK[point], rootOfSquares(spectra.QP[point], quasiPeak));
-  spectra.AV[point] = Math.min(spectra.QP[point], spectra.AV[point] + average);
+  spectra.PK[point] = max(spectra.PK[point], peak);
+  spectra.QP[point] = min(spectra.PK[point], rootOfSquares(spectra.QP[point], quasiPeak));
+  spectra.AV[point] = min(spectra.QP[point], spectra.AV[point] + average);
 }
 
 function addPowers(total: LineSpectra, own: LineSpectra): void {
@@ -147,5 +150,5 @@ function addPowers(total: LineSpectra, own: LineSpectra): void {
 }
 
 function rootOfSquares(a: number, b: number): number {
-  return Math.sqrt(a * a + b * b);
+  return sqrt(a * a + b * b);
 }

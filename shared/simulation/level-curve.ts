@@ -1,6 +1,9 @@
 import type { FrequencyRaster } from './emission-spectrum';
 import type { RandomGenerator } from './random-generator';
 
+// NOTE: taken once: looking Math up in every turn of these loops is ten times slower in a test runner's sandbox.
+const { floor, log, min } = Math;
+
 /**
  * Draws a level error that changes slowly over frequency.
  *
@@ -21,11 +24,11 @@ export function drawLevelCurve(
   const offsetDb = spread.offsetDb * random.nextNormal();
   const knotsDb = Array.from({ length: spread.knots }, () => spread.knotDb * random.nextNormal());
   const endHz = raster.startHz + raster.stepHz * (raster.pointCount - 1);
-  const perNeper = (spread.knots - 1) / Math.log(endHz / raster.startHz);
+  const perNeper = (spread.knots - 1) / log(endHz / raster.startHz);
   const curve = new Float32Array(raster.pointCount);
   for (let point = 0; point < raster.pointCount; point++) {
-    const position = Math.log(1 + (point * raster.stepHz) / raster.startHz) * perNeper;
-    const below = Math.min(spread.knots - 2, Math.floor(position));
+    const position = log(1 + (point * raster.stepHz) / raster.startHz) * perNeper;
+    const below = min(spread.knots - 2, floor(position));
     curve[point] = offsetDb + knotsDb[below] + (position - below) * (knotsDb[below + 1] - knotsDb[below]);
   }
   return curve;
