@@ -1,11 +1,4 @@
-export const GUARD_CODES = [
-  'constantOffset',
-  'detectorOrder',
-  'sameDayShift',
-  'lineExchange',
-  'correctionCurve',
-  'benchVerification',
-] as const;
+export const GUARD_CODES = ['constantOffset', 'detectorOrder', 'sameDayShift'] as const;
 
 export type GuardCode = (typeof GUARD_CODES)[number];
 

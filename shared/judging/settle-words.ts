@@ -18,9 +18,6 @@ const SETTLES: Record<Exclude<ReasonCode, 'withinSpread'>, string> = {
   constantOffset: BENCH_FIRST,
   detectorOrder: BENCH_FIRST,
   sameDayShift: BENCH_FIRST,
-  lineExchange: BENCH_FIRST,
-  correctionCurve: BENCH_FIRST,
-  benchVerification: BENCH_FIRST,
 };
 
 const NUMBER_WORDS = [
@@ -44,7 +41,7 @@ function moreRuns(count: number): string {
 }
 
 function runsInWords(needed: RunsNeeded | null): string {
-  if (needed === null) return 'no small number of runs: change the threshold, or lower the spread of the bench';
+  if (needed === null) return 'more than twelve further runs of both builds';
   const ofBuild = `${moreRuns(needed.buildRuns)} of this build`;
   return needed.referenceRuns === 0
     ? ofBuild
