@@ -24,6 +24,7 @@ import { limitRoutes } from './limits/limit-routes';
 import { mailboxRoutes } from './mail/mailbox-routes';
 import { marginRoutes } from './margins/margin-routes';
 import { productRoutes } from './products/product-routes';
+import { runRoutes } from './queue/run-routes';
 import { ServiceError } from './service-error';
 import { importRoutes } from './sweeps/import-routes';
 import { sweepRoutes } from './sweeps/sweep-routes';
@@ -45,6 +46,7 @@ const FEATURES = [
   buildRoutes,
   marginRoutes,
   judgingRoutes,
+  runRoutes,
   dropRoutes,
   limitRoutes,
   digestRoutes,
