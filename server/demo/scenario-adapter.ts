@@ -99,7 +99,7 @@ const BOARD_A1: HardwareRevision = {
     converterCapacitor: { capacitanceF: 82e-6, esrOhm: 0.05, eslH: 18e-9 },
     differentialChoke: { inductanceH: 160e-6, windingCapacitanceF: 12e-12, lossOhm: 6e3 },
     mainsCapacitor: { capacitanceF: 0.22e-6, esrOhm: 0.05, eslH: 12e-9 },
-    bypassH: 0.9e-9,
+    bypassH: 0.2e-9,
   },
   stages: [
     {

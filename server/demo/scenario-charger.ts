@@ -191,5 +191,5 @@ const HISTORY: BuildRow[] = [
     background: true,
   },
   { hardware: 'C2', firmware: '4.0.1', daysAgo: 15, changes: ['current sharing'], runs: 0 },
-  { hardware: 'C2', firmware: '4.1.0', daysAgo: 4, changes: ['charge profile editor'], runs: 2, background: true },
+  { hardware: 'C2', firmware: '4.1.0', daysAgo: 5, changes: ['charge profile editor'], runs: 3, background: true },
 ];

@@ -7,7 +7,7 @@ const STANDBY = '230 V enabled, standing';
 
 /**
  * The drive's story: firmware 2.3.0 strengthens the gate drive to save switching losses; the edges get 2.3 times as fast, and
- * everything above 3 MHz rises by up to 7 dB. The team accepts it (margin left is enough, the heat sink gets smaller) and makes 2.3.1
+ * everything above 3 MHz rises by up to 7 dB. The team accepts it (margin left is enough, the heat sink gets smaller) and makes 2.3.0
  * the new reference.
  * Beside it: three builds nobody measured in a row, a second unit, and runs on the open bench with its broadcast pick-up.
  */
@@ -37,8 +37,8 @@ export function driveProduct(nowMs: number): DemoProduct {
         reason: 'First series release.',
       },
       {
-        build: { hardware: 'M2', firmware: '2.3.1' },
-        chosenAtMs: nowMs - 62 * DAY_MS,
+        build: { hardware: 'M2', firmware: '2.3.0' },
+        chosenAtMs: nowMs - 72 * DAY_MS,
         chosenByEmail: 'hanae.morwick@brackenholt.example',
         reason: 'Faster edges accepted; new starting point.',
       },

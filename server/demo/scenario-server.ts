@@ -8,7 +8,7 @@ const LIGHT_LOAD = '230 V 10 %';
 
 /**
  * The server supply's story: the X capacitors of each new lot hold a little less, 27 % in all over fifteen builds. No build loses
- * enough by itself, yet the low band creeps up by some 4 dB.
+ * enough by itself, yet the low band creeps up by some 4 dB, until the newest build is flagged against the reference.
  * Beside it: at build 5.6.0 the loss of the 10 dB pad was entered twice, so everything reads 10 dB high, the floor too: a bench
  * fault, measured again two weeks later with 5.6.1; the newest build has not been measured at 10 % load; board
  * S3 brought a better winding of the LLC transformer (a gain at 180 kHz).
@@ -182,19 +182,19 @@ const HISTORY: BuildRow[] = [
   { hardware: 'S3', firmware: '5.2.1', daysAgo: 148, changes: ['update after reset'], lot: lot(0.92), runs: 2 },
   { hardware: 'S3', firmware: '5.3.0', daysAgo: 136, changes: ['sequence', 'X capacitor lot 2619'], lot: lot(0.9) },
   { hardware: 'S3', firmware: '5.4.0', daysAgo: 121, changes: ['energy counter'], lot: lot(0.885) },
-  { hardware: 'S3', firmware: '5.4.1', daysAgo: 110, changes: ['counter overflow'], lot: lot(0.865) },
-  { hardware: 'S3', firmware: '5.5.0', daysAgo: 97, changes: ['power limit', 'X capacitor lot 2624'], lot: lot(0.845) },
+  { hardware: 'S3', firmware: '5.4.1', daysAgo: 110, changes: ['counter overflow'], lot: lot(0.87) },
+  { hardware: 'S3', firmware: '5.5.0', daysAgo: 97, changes: ['power limit', 'X capacitor lot 2624'], lot: lot(0.86) },
   {
     hardware: 'S3',
     firmware: '5.6.0',
     daysAgo: 83,
     changes: ['cold redundancy'],
-    lot: lot(0.83),
+    lot: lot(0.85),
     padMistake: { padDb: 10, enteredPadDb: 20 },
   },
-  { hardware: 'S3', firmware: '5.6.1', daysAgo: 69, changes: ['wake'], lot: lot(0.81), runs: 2, background: true },
-  { hardware: 'S3', firmware: '5.7.0', daysAgo: 52, changes: ['signed updates'], lot: lot(0.79) },
-  { hardware: 'S3', firmware: '5.8.0', daysAgo: 33, changes: ['fan life', 'X capacitor lot 2631'], lot: lot(0.76) },
+  { hardware: 'S3', firmware: '5.6.1', daysAgo: 69, changes: ['wake'], lot: lot(0.84), background: true },
+  { hardware: 'S3', firmware: '5.7.0', daysAgo: 52, changes: ['signed updates'], lot: lot(0.81) },
+  { hardware: 'S3', firmware: '5.8.0', daysAgo: 33, changes: ['fan life', 'X capacitor lot 2631'], lot: lot(0.77) },
   {
     hardware: 'S3',
     firmware: '5.8.1',
