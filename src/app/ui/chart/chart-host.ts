@@ -15,8 +15,9 @@ import { MatButton } from '@angular/material/button';
 import { MatIcon } from '@angular/material/icon';
 import { MatTooltip } from '@angular/material/tooltip';
 import type { ECharts, EChartsCoreOption } from 'echarts/core';
-import { NgxEchartsDirective, provideEchartsCore } from 'ngx-echarts';
+import { NGX_ECHARTS_CONFIG, NgxEchartsConfig, NgxEchartsDirective } from 'ngx-echarts';
 import { Skeleton } from '../skeleton';
+import { CHART_ENGINE } from './chart-engine';
 import { ChartReadout, Readout } from './chart-readout';
 import type { ChartTable } from './chart-table';
 import { ChartTableView } from './chart-table-view';
@@ -25,8 +26,6 @@ import { PlotPointer } from './plot-pointer';
 import { saveFile } from './save-file';
 import { toCsv } from './to-csv';
 
-const loadEcharts = () => import('./echarts');
-
 /**
  * Every chart of the product stands in this frame: canvas, pointer and keyboard, downloads and the table view.
  * It is the only door to the drawing library. Builders such as SpectrumChart give it an option and answer its events.
@@ -34,7 +33,12 @@ const loadEcharts = () => import('./echarts');
 @Component({
   selector: 'app-chart-host',
   imports: [ChartReadout, ChartTableView, MatButton, MatIcon, MatTooltip, NgxEchartsDirective, PlotPointer, Skeleton],
-  providers: [provideEchartsCore({ echarts: loadEcharts })],
+  providers: [
+    {
+      provide: NGX_ECHARTS_CONFIG,
+      useFactory: (): NgxEchartsConfig => ({ echarts: inject(CHART_ENGINE) }),
+    },
+  ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './chart-host.html',
   styleUrl: './chart-host.scss',
@@ -72,7 +76,7 @@ export class ChartHost {
   protected readonly shownOption = computed(() => (this.chart() ? this.option() : untracked(this.option)));
 
   constructor() {
-    void loadEcharts().then(() => this.isLoaded.set(true));
+    void inject(CHART_ENGINE)().then(() => this.isLoaded.set(true));
     const observer = new ResizeObserver(() => this.measure());
     const destroy = inject(DestroyRef);
     destroy.onDestroy(() => observer.disconnect());

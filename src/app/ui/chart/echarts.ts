@@ -5,5 +5,5 @@ import { CanvasRenderer } from 'echarts/renderers';
 
 use([CanvasRenderer, CustomChart, GridComponent, LineChart, MarkAreaComponent, MarkLineComponent, ScatterChart]);
 
-// NOTE: loaded lazily by chart-host.ts; nothing else may import the drawing library's code (types are free).
+// NOTE: loaded lazily through chart-engine.ts; nothing else may import the drawing library's code (types are free).
 export { init };
