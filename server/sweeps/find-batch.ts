@@ -1,5 +1,6 @@
 import type { Context } from '../context';
-import { findLatestRun, type JobRun } from '../queue/run-store';
+import { latestRun } from '../queue/latest-run';
+import type { JobRun } from '../queue/run-store';
 import { ServiceError } from '../service-error';
 import type { Team } from '../teams/team-store';
 import { batchLock } from './enqueue-batch';
@@ -41,7 +42,7 @@ function progressOf(context: Context, named: NamedBatch, items: ItemResult[]): B
   return {
     ...named,
     counts: countItems(context.db, id),
-    run: findLatestRun(context.db, batchLock(id)),
+    run: latestRun(context, batchLock(id)),
     items,
   };
 }

@@ -10,9 +10,9 @@ import { sha256 } from './original-files';
 import { presentBatch } from './present-batch';
 import { frameReading, presentReading } from './present-reading';
 import { readFile } from './read-sweep-file';
-import { sendFrames, wantsFrames } from './send-frames';
+import { sendFrames, wantsFrames } from '../http/send-frames';
 import { startBatch } from './start-batch';
-import { jsonField, uploadedFile, uploadMany, uploadOne } from './upload';
+import { jsonField, uploadedFile, uploadMany, uploadOne } from '../http/upload';
 
 /** Import by page: readings and batches. */
 export function importRoutes(context: Context): Router {

@@ -12,8 +12,8 @@ import { overlay } from './overlay';
 import { presentSweep, presentTrace } from './present-sweep';
 import { readTrace } from './read-trace';
 import { removeSweep } from './remove-sweep';
-import { sendFrames, wantsFrames } from './send-frames';
-import { jsonField, uploadedFile, uploadOne } from './upload';
+import { sendFrames, wantsFrames } from '../http/send-frames';
+import { jsonField, uploadedFile, uploadOne } from '../http/upload';
 
 /** Sweeps: import, record, trace, original, overlay. */
 export function sweepRoutes(context: Context): Router {

@@ -1,4 +1,5 @@
 import type { ImportBatchView, ImportPlan, PreviewTrace } from '@shared/contracts/imports';
+import type * as z from 'zod';
 import { decodeFrames } from '@shared/traces/frames';
 import { and, eq } from 'drizzle-orm';
 import type { Express } from 'express';
@@ -12,10 +13,12 @@ import { HeldRun, RunLostError } from '../../server/queue/held-run';
 import { importBatch } from '../../server/sweeps/import-batch';
 import { requestOpenBatches } from '../../server/sweeps/request-batches';
 import { buildLevels, buildSweepFile, buildTags } from '../builders/sweep-builder';
-import { buildBench, buildPerson, buildProduct, buildTeam, buildToken } from '../builders/team-builder';
+import { buildBench, buildProduct, buildTeam, buildToken } from '../builders/team-builder';
 import { countStored } from '../support/count-stored';
 import { signInAs, type Visitor } from '../support/sign-in';
 import { createTestContext, type TestContext } from '../support/test-context';
+
+type PlanInput = z.input<typeof ImportPlan>;
 
 let context: TestContext;
 let app: Express;
@@ -44,7 +47,7 @@ function post(files: readonly Buffer[], plan: unknown, by: Visitor = visitor): T
 }
 
 /** Everything but line and detector once for all. */
-function planOf(items: ImportPlan['items']): ImportPlan {
+function planOf(items: PlanInput['items']): PlanInput {
   const { line: _line, detector: _detector, ...tags } = buildTags(product, bench);
   return { tags, items };
 }

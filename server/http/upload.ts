@@ -2,7 +2,7 @@ import type { Request, RequestHandler } from 'express';
 import multer from 'multer';
 import type { Context } from '../context';
 import { ServiceError } from '../service-error';
-import type { OriginalFiles } from './original-files';
+import type { OriginalFiles } from '../sweeps/original-files';
 
 /** Most files one batch takes. */
 const MOST_FILES = 2000;
