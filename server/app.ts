@@ -7,7 +7,6 @@ import { resolve } from 'node:path';
 import passport from 'passport';
 import { pinoHttp } from 'pino-http';
 import { accountRoutes } from './accounts/account-routes';
-import { identify } from './accounts/identify';
 import { auditRoutes } from './audit/audit-routes';
 import { benchRoutes } from './benches/bench-routes';
 import { buildRoutes } from './builds/build-routes';
@@ -17,6 +16,7 @@ import { dropRoutes } from './drops/drop-routes';
 import { guardCrossSite } from './http/cross-site';
 import { handleErrors } from './http/handle-errors';
 import { healthRoutes } from './http/health-routes';
+import { identify } from './http/identify';
 import { openapiRoutes } from './http/openapi-routes';
 import { SESSION_MS, SessionStore } from './http/session-store';
 import { judgingRoutes } from './judging/judging-routes';
@@ -74,7 +74,7 @@ export function createApp(context: Context): Express {
   );
 
   app.use('/api', healthRoutes(context), unsubscribeRoutes(context), express.json({ limit: '256kb' }));
-  app.use('/api', sessionOf(context), passport.session(), identify(context), guardCrossSite);
+  app.use('/api', sessionOf(context), passport.session() as express.RequestHandler, identify(context), guardCrossSite);
   for (const routes of FEATURES) app.use('/api', routes(context));
   app.use('/api', (request) => {
     throw new ServiceError('notFound', `there is no ${request.method} ${request.originalUrl}`);

@@ -7,7 +7,7 @@ import { pathText } from '../http/route-parameters';
 import { changePassword } from './change-password';
 import { requestPasswordReset } from './request-password-reset';
 import { resetPassword } from './reset-password';
-import { endSession, startSession } from './session-of-request';
+import { endSession, startSession } from '../http/session-of-request';
 
 /** Changing a password, and setting a new one by e-mail. */
 export function passwordRoutes(context: Context): Router {

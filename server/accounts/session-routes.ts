@@ -8,7 +8,7 @@ import { throttleSignIn } from '../http/limits';
 import { endSessionsOf } from '../http/session-store';
 import { ServiceError } from '../service-error';
 import { presentSession } from './present-session';
-import { endSession, startSession } from './session-of-request';
+import { endSession, startSession } from '../http/session-of-request';
 import { signInStrategy } from './sign-in-strategy';
 
 /** Signing in and out. */

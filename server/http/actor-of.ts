@@ -5,7 +5,7 @@ import { ServiceError } from '../service-error';
 
 const actors = new WeakMap<Request, Actor>();
 
-/** Notes who makes the request; `server/accounts/identify.ts` is the one caller. */
+/** Notes who makes the request; `identify.ts` is the one caller. */
 export function setActor(request: Request, actor: Actor): void {
   actors.set(request, actor);
 }

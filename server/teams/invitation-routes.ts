@@ -1,7 +1,7 @@
 import { InvitationAnswer } from '@shared/contracts/session';
 import { InvitationInput } from '@shared/contracts/teams';
 import { Router } from 'express';
-import { startSession } from '../accounts/session-of-request';
+import { startSession } from '../http/session-of-request';
 import type { Context } from '../context';
 import { personOf } from '../http/actor-of';
 import { throttleGuesses, throttleInvitations } from '../http/limits';

@@ -83,7 +83,7 @@ export type DropSummary = z.infer<typeof DropSummary>;
 
 /** GET /api/v1/drops/:id */
 export const DropView = DropSummary.extend({
-  evidence: z.custom<DropEvidence>(),
+  evidence: z.custom<DropEvidence>().meta({ type: 'object', description: 'what it was judged on, frozen' }),
   buildSwitching: z.array(SwitchingStage),
   remarks: z.array(Remark),
   fixedBy: z.object({ id: z.int(), hardware: z.string(), firmware: z.string() }).nullable(),

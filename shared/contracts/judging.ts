@@ -32,7 +32,9 @@ export const VerdictsView = z
         differenceDb: z.number().nullable(),
         worstMarginDb: z.number().nullable(),
         worstFrequencyHz: z.number().nullable(),
-        judgement: z.custom<BandJudgement>(),
+        judgement: z
+          .custom<BandJudgement>()
+          .meta({ type: 'object', description: 'the comparison with all its figures' }),
       }),
     ),
   })

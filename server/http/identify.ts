@@ -1,9 +1,9 @@
 import type { RequestHandler } from 'express';
+import { personActor } from '../accounts/person-actor';
 import type { Context } from '../context';
-import { setActor } from '../http/actor-of';
-import type {} from '../http/session-user';
 import { authenticateToken } from '../tokens/authenticate-token';
-import { personActor } from './person-actor';
+import { setActor } from './actor-of';
+import type {} from './session-user';
 
 /** Finds out who makes the request: a team token in the header, or the person of the session. */
 export function identify(context: Context): RequestHandler {
