@@ -13,6 +13,7 @@ import { dropCases } from './drop-cases';
 import { type GatheredSeries, gatherSeries } from './gather-series';
 import { gravestVerdict } from './gravest-verdict';
 import { updateJudgedBuild } from './judged-build-store';
+import { markStale } from './mark-stale';
 import { rejudgeNeighbours } from './rejudge-neighbours';
 import { withSameDayGuards } from './same-day-guard';
 import { traceFacts } from './trace-facts';
@@ -36,13 +37,15 @@ export function judgeOneBuild(context: Context, buildId: number): JudgedBuildOut
   const verdict = gravestVerdict(judgements.map((judgement) => judgement.verdict));
   return withTransaction(context.db, () => {
     const former = listVerdicts(context.db, buildId);
-    storeVerdicts(context, buildId, former, judgements);
+    const isChanged = storeVerdicts(context, buildId, former, judgements);
     updateJudgedBuild(context.db, buildId, {
       verdict,
       judgedAt: judgements.length > 0 ? context.now() : null,
       judgedVersion: record.build.dataVersion,
     });
     settleDrops(context, JUDGE, { id: buildId, product: record.product }, cases, judgements);
+    // Later builds may be compared with this one: what it was judged decides whether it belongs to their reference.
+    if (isChanged) markStale(context, record.product.id, record.build.position + 1);
     if (hasNewSweeps(former, judgements)) rejudgeNeighbours(context, record);
     return { verdict };
   });
@@ -67,20 +70,22 @@ function buildInput({ thresholdDb, targetMarginDb }: BuildRecord, series: readon
   };
 }
 
-/** A verdict that came out as before keeps its row and date. */
+/** A verdict that came out as before keeps its row and date. Returns whether any did not. */
 function storeVerdicts(
   context: Context,
   buildId: number,
   former: readonly VerdictRow[],
   judgements: readonly BandJudgement[],
-): void {
+): boolean {
   const methodVersion = Number(METHOD_VERSION);
   const standing = new Map(former.map((row) => [placeKey(row), row]));
+  let isChanged = false;
   for (const judgement of judgements) {
     const row = standing.get(placeKey(judgement));
     standing.delete(placeKey(judgement));
     const isSame = row?.methodVersion === methodVersion && JSON.stringify(row.judgement) === JSON.stringify(judgement);
     if (isSame) continue;
+    isChanged = true;
     const { stateId, line, detector, band, verdict, overLimit, differenceDb, worst } = judgement;
     upsertVerdict(context.db, {
       buildId,
@@ -102,6 +107,7 @@ function storeVerdicts(
     context.db,
     [...standing.values()].map(({ id }) => id),
   );
+  return isChanged || standing.size > 0;
 }
 
 function placeKey({ stateId, line, detector, band }: Pick<VerdictRow, 'stateId' | 'line' | 'detector' | 'band'>) {
