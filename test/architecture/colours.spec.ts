@@ -5,7 +5,9 @@ const colour = /(?:["'`(,]\s*|:\s*)#(?:[0-9a-f]{3,4}|[0-9a-f]{6}|[0-9a-f]{8})\b|
 const comment = /\/\*[\s\S]*?\*\/|^\s*\/\/.*$|<!--[\s\S]*?-->/gm;
 
 it('names colours in the theme only', () => {
-  const styled = filesIn('src').filter((file) => /\.(ts|html|scss)$/.test(file) && !file.startsWith('src/theme/'));
+  const styled = filesIn('src').filter(
+    (file) => /(?<!\.spec)\.(ts|html|scss)$/.test(file) && !file.startsWith('src/theme/'),
+  );
   const found = styled.flatMap((file) =>
     (textOf(file).replace(comment, '').match(colour) ?? []).map((text) => `${file}: ${text}`),
   );
