@@ -67,7 +67,7 @@ function addressOf(request: Request): string {
 }
 
 function emailOf(request: Request): string {
-  const { email } = request.body as { email?: unknown };
+  const email = (request.body as { email?: unknown } | undefined)?.email;
   return typeof email === 'string' ? email.trim().toLowerCase() : '';
 }
 

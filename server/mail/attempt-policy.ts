@@ -3,7 +3,7 @@ const MINUTE_MS = 60_000;
 /** Longer than one attempt can last. */
 export const SHORTEST_WAIT_MS = 2 * MINUTE_MS;
 
-/** RFC 5321 4.5.4.1 asks for some tries in the first hours and for patience after that. */
+/** Denser at first than the 30 minutes of RFC 5321 4.5.4.1: the server is the installation's own, and somebody waits for a link. */
 const WAITS_MS = [SHORTEST_WAIT_MS, ...[10, 30, 120, 360, 1440].map((minutes) => minutes * MINUTE_MS)];
 
 /** How long after its n-th attempt (1 first) a mail is tried again; undefined: that was the last. */

@@ -78,6 +78,12 @@ describe('a forgotten password', () => {
     expect(secretMailedTo(context, 'nobody@strandline.example')).toBeUndefined();
   });
 
+  it('needs an e-mail', async () => {
+    const visitor = await visit(app);
+    await visitor.post('/api/password-resets').expect(400);
+    await visitor.post('/api/password-resets').send({ email: 'nobody' }).expect(400);
+  });
+
   it('has a link that ends after an hour', async () => {
     const { person } = buildPerson(context, { passwordHash });
     const visitor = await visit(app);
