@@ -1,7 +1,7 @@
 import type { SweepTagsInput } from '@shared/contracts/sweeps';
 import type { Bench } from '../../server/benches/find-bench';
 import type { Context } from '../../server/context';
-import { benches, products, teams } from '../../server/db/schema';
+import type { products, teams } from '../../server/db/schema';
 import { judgeJob } from '../../jobs/judge';
 import { workOnce } from '../../jobs/worker';
 import { buildSweep, type TraceShape } from './sweep-builder';
@@ -14,7 +14,7 @@ type Product = typeof products.$inferSelect;
 export interface Laboratory {
   team: Team;
   product: Product;
-  bench: typeof benches.$inferSelect & Bench;
+  bench: Bench;
 }
 
 export function buildLaboratory(context: Context): Laboratory {
