@@ -1,3 +1,4 @@
+import { announce } from './announce';
 import { createApp } from './app';
 import { readConfig } from './config/read-config';
 import { createContext } from './context';
@@ -5,21 +6,27 @@ import { migrate } from './db/migrate';
 import { seedDemoIfEmpty } from './demo/seed-demo';
 import { listen } from './listen';
 import { openMailbox } from './mail/open-mailbox';
+import { orExplain } from './or-explain';
 
-const config = readConfig(process.env);
-const context = createContext(config, 'server');
-migrate(context.db);
-const mailbox = await openMailbox(context);
-if (config.seedsDemo) await seedDemoIfEmpty(context);
-const { server, url } = await listen(createApp(context), config.port, config.host);
-context.log.info({ url }, 'listening');
-process.send?.({ ready: url });
+await orExplain(async () => {
+  const config = readConfig(process.env);
+  const context = createContext(config, 'server');
+  migrate(context.db);
+  const mailbox = await openMailbox(context);
+  if (config.seedsDemo) await seedDemoIfEmpty(context);
+  const { server, url } = await listen(createApp(context), config.port, config.host);
+  announce(context, url);
+  process.send?.({ ready: url });
 
-function stop(): void {
-  server.close(() => {
-    void mailbox?.close().finally(() => context.close());
-  });
-  server.closeIdleConnections();
-}
-process.once('SIGTERM', stop);
-process.once('SIGINT', stop);
+  const stop = (): void => {
+    server.close(() => {
+      void Promise.resolve(mailbox?.close()).finally(() => context.close());
+    });
+    server.closeIdleConnections();
+    if (process.connected) process.disconnect();
+  };
+  process.once('SIGTERM', stop);
+  process.once('SIGINT', stop);
+  // The start script has gone without saying so.
+  process.once('disconnect', stop);
+});

@@ -1,5 +1,6 @@
-import { and, asc, count, eq, max } from 'drizzle-orm';
+import { and, asc, count, eq, max, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
+import { prepared } from '../db/prepared';
 import { benches, sweeps } from '../db/schema';
 
 export type Bench = typeof benches.$inferSelect;
@@ -14,12 +15,16 @@ export function listBenchesOf(db: Database, teamId: number): Bench[] {
   return db.select().from(benches).where(eq(benches.teamId, teamId)).orderBy(asc(benches.name)).all();
 }
 
-export function findBenchByKey(db: Database, teamId: number, key: string): Bench | undefined {
-  return db
+const byKey = prepared((db) =>
+  db
     .select()
     .from(benches)
-    .where(and(eq(benches.teamId, teamId), eq(benches.key, key)))
-    .get();
+    .where(and(eq(benches.teamId, sql.placeholder('teamId')), eq(benches.key, sql.placeholder('key'))))
+    .prepare(),
+);
+
+export function findBenchByKey(db: Database, teamId: number, key: string): Bench | undefined {
+  return byKey(db).get({ teamId, key });
 }
 
 export function insertBench(db: Database, bench: typeof benches.$inferInsert): Bench {

@@ -1,9 +1,9 @@
+import { createPerson } from '../accounts/create-person';
+import { personWithEmail } from '../accounts/find-person';
 import { hashPassword } from '../accounts/password-hash';
 import { personActor } from '../accounts/person-actor';
-import { findPersonByEmail, insertPerson } from '../accounts/person-store';
 import type { PersonActor } from '../actor';
 import type { Context } from '../context';
-import { findTeamByKey } from '../teams/team-store';
 import { newSecret } from '../tokens/token-secret';
 import { DEMO_PASSWORD } from './demo-sign-ins';
 import type { DemoScenario } from './scenario-types';
@@ -30,7 +30,7 @@ export function seedPeople(context: Context, scenario: DemoScenario, passwordHas
     }
   }
   for (const { name, email, isAdministrator, memberships } of scenario.people) {
-    const person = insertPerson(db, { name, email, isAdministrator, passwordHash, createdAt });
+    const person = createPerson(context, { name, email, isAdministrator, passwordHash });
     for (const { teamKey, role } of memberships) {
       const teamId = idOf(teamIds, teamKey);
       insertMembership(db, { teamId, personId: person.id, role, createdAt });
@@ -50,7 +50,7 @@ export function seedPeople(context: Context, scenario: DemoScenario, passwordHas
 
 /** A person of the demo as an actor. @throws Error when the scenario names somebody it does not have */
 export function demoActor(context: Context, email: string): PersonActor {
-  const person = findPersonByEmail(context.db, email);
+  const person = personWithEmail(context, email);
   const actor = person && personActor(context, person.id);
   if (actor === undefined) throw new Error(`the demo scenario has no person ${email}`);
   return actor;
@@ -63,13 +63,6 @@ export function demoActorWith(context: Context, scenario: DemoScenario, teamKey:
   );
   if (person === undefined) throw new Error(`the demo scenario has no ${role} in ${teamKey}`);
   return demoActor(context, person.email);
-}
-
-/** The demo's team as stored. */
-export function demoTeam(context: Context, key: string) {
-  const team = findTeamByKey(context.db, key);
-  if (team === undefined) throw new Error(`the demo scenario has no team ${key}`);
-  return team;
 }
 
 function idOf(ids: ReadonlyMap<string, number>, key: string): number {

@@ -10,9 +10,10 @@ import { createState } from '../products/edit-state';
 import { type FoundProduct, findProduct } from '../products/find-product';
 import { shareProduct } from '../products/share-product';
 import { importSweep } from '../sweeps/import-sweep';
+import { findTeam } from '../teams/find-team';
 import type { DemoBuild, DemoProduct, DemoScenario, DemoSession } from './scenario-types';
 import { seedDropAction } from './seed-drop-action';
-import { demoActor, demoActorWith, demoTeam } from './seed-people';
+import { demoActor, demoActorWith } from './seed-people';
 import { firmwareOf } from './simulate-condition';
 import type { DemoSimulator } from './simulate-session';
 
@@ -69,7 +70,7 @@ export function seedProduct(
 
   const { key, name, description, limitSetKey, targetMarginDb } = product;
   const first = at(context, Math.min(...product.builds.map(({ builtAtMs }) => builtAtMs)) - DAY_MS);
-  createProduct(first, lead, demoTeam(context, product.teamKey), {
+  createProduct(first, lead, findTeam(first, lead, product.teamKey, 'products.edit'), {
     key,
     name,
     description,
@@ -79,7 +80,7 @@ export function seedProduct(
   for (const { operation: _operation, ...state } of product.states)
     createState(first, lead, found(first).product, state);
   if (product.sharedWith.length > 0) shareProduct(first, lead, found(first), product.sharedWith);
-  for (const { at: when, happen } of happenings.sort((a, b) => a.at - b.at)) happen(at(context, when));
+  for (const happening of happenings.sort((a, b) => a.at - b.at)) happening.happen(at(context, happening.at));
 
   function importSession(then: Context, build: DemoBuild, session: DemoSession): void {
     const { fileName, bytes, tags } = simulator.simulateSession(product, build, session);

@@ -1,6 +1,6 @@
-import { and, asc, desc, eq, isNull, like, sql } from 'drizzle-orm';
+import { and, asc, desc, eq, inArray, isNull, like, or, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
-import { digestRecipients, digests, digestSettings, outboxMails, teams } from '../db/schema';
+import { digestRecipients, digests, digestSettings, memberships, outboxMails, people, teams } from '../db/schema';
 
 export type DigestRecipient = typeof digestRecipients.$inferSelect;
 export type Digest = typeof digests.$inferSelect;
@@ -35,12 +35,24 @@ export function listRecipients(db: Database, teamId: number): DigestRecipient[] 
     .all();
 }
 
-/** Those who did not unsubscribe. */
+/** Those who did not unsubscribe: addresses outside, and people who are still members and may sign in. */
 export function listSubscribed(db: Database, teamId: number): DigestRecipient[] {
+  const members = db
+    .select({ id: memberships.personId })
+    .from(memberships)
+    .innerJoin(people, eq(people.id, memberships.personId))
+    .where(and(eq(memberships.teamId, teamId), isNull(people.disabledAt)));
   return db
     .select()
     .from(digestRecipients)
-    .where(and(eq(digestRecipients.teamId, teamId), isNull(digestRecipients.unsubscribedAt)))
+    .where(
+      and(
+        eq(digestRecipients.teamId, teamId),
+        isNull(digestRecipients.unsubscribedAt),
+        or(isNull(digestRecipients.personId), inArray(digestRecipients.personId, members)),
+      ),
+    )
+    .orderBy(asc(digestRecipients.email))
     .all();
 }
 

@@ -1,5 +1,6 @@
 import { and, asc, eq, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
+import { prepared } from '../db/prepared';
 import { buildCells, builds, sweeps } from '../db/schema';
 
 export interface RolledSweep {
@@ -17,9 +18,8 @@ export type RollUp = Pick<
   'sweepCount' | 'worstMarginDb' | 'worstFrequencyHz' | 'worstSweepId'
 >;
 
-/** Product sweeps of a build, those of one series together. */
-export function listRolledSweeps(db: Database, buildId: number): RolledSweep[] {
-  return db
+const sweepsOfBuild = prepared((db) =>
+  db
     .select({
       id: sweeps.id,
       stateId: sweeps.stateId,
@@ -30,25 +30,49 @@ export function listRolledSweeps(db: Database, buildId: number): RolledSweep[] {
       cells: sweeps.cells,
     })
     .from(sweeps)
-    .where(and(eq(sweeps.buildId, buildId), eq(sweeps.kind, 'product')))
+    .where(and(eq(sweeps.buildId, sql.placeholder('buildId')), eq(sweeps.kind, 'product')))
     .orderBy(asc(sweeps.stateId), asc(sweeps.line), asc(sweeps.detector), asc(sweeps.id))
-    .all();
+    .prepare(),
+);
+
+/** Product sweeps of a build, those of one series together. */
+export function listRolledSweeps(db: Database, buildId: number): RolledSweep[] {
+  return sweepsOfBuild(db).all({ buildId });
 }
+
+const rollUpUpdate = prepared((db) =>
+  db
+    .update(builds)
+    .set({
+      sweepCount: sql`${sql.placeholder('sweepCount')}`,
+      worstMarginDb: sql`${sql.placeholder('worstMarginDb')}`,
+      worstFrequencyHz: sql`${sql.placeholder('worstFrequencyHz')}`,
+      worstSweepId: sql`${sql.placeholder('worstSweepId')}`,
+      dataVersion: sql`${builds.dataVersion} + 1`,
+    })
+    .where(eq(builds.id, sql.placeholder('buildId')))
+    .prepare(),
+);
 
 /** Writes a build's roll-up and raises its data version. */
 export function updateRollUp(db: Database, buildId: number, rollUp: RollUp): void {
-  db.update(builds)
-    .set({ ...rollUp, dataVersion: sql`${builds.dataVersion} + 1` })
-    .where(eq(builds.id, buildId))
-    .run();
+  rollUpUpdate(db).run({ buildId, ...rollUp });
 }
 
+const cellsUpsert = prepared((db) => {
+  const [buildId, series, cells, tile] = ['buildId', 'series', 'cells', 'tile'].map((name) => sql.placeholder(name));
+  return db
+    .insert(buildCells)
+    .values({ buildId, series, cells, tile })
+    .onConflictDoUpdate({
+      target: buildCells.buildId,
+      set: { series: sql`excluded.series`, cells: sql`excluded.cells`, tile: sql`excluded.tile` },
+    })
+    .prepare();
+});
+
 export function upsertBuildCells(db: Database, row: typeof buildCells.$inferInsert): void {
-  const { buildId, ...cells } = row;
-  db.insert(buildCells)
-    .values({ buildId, ...cells })
-    .onConflictDoUpdate({ target: buildCells.buildId, set: cells })
-    .run();
+  cellsUpsert(db).run({ ...row });
 }
 
 export function deleteBuildCells(db: Database, buildId: number): void {

@@ -5,6 +5,7 @@ import type { Actor } from '../actor';
 import { recordAudit } from '../audit/record-audit';
 import type { Context } from '../context';
 import { withTransaction } from '../db/with-transaction';
+import { markStale } from '../judging/mark-stale';
 import { ServiceError } from '../service-error';
 import type { FoundProduct } from './find-product';
 import { countSweeps, insertProduct, type Product, type Team, updateProduct } from './product-store';
@@ -54,6 +55,8 @@ export function editProduct(
   }
   return withTransaction(context.db, () => {
     const changed = updateProduct(context.db, product.id, patch);
+    // Verdicts state the target margin they were held against.
+    if (changed.targetMarginDb !== product.targetMarginDb) markStale(context, product.id, 1);
     recordAudit(context, actor, {
       teamId: product.teamId,
       action: 'product.changed',

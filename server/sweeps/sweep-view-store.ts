@@ -1,6 +1,7 @@
 import type { Detector, Line, SweepKind } from '@shared/detectors/detectors';
-import { and, desc, eq, inArray, lt } from 'drizzle-orm';
+import { and, desc, eq, inArray, lt, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
+import { prepared } from '../db/prepared';
 import {
   benches,
   builds,
@@ -62,8 +63,14 @@ function sweepRows(db: Database) {
 /** A sweep with the names of everything it belongs to. */
 export type SweepRow = ReturnType<ReturnType<typeof sweepRows>['all']>[number];
 
+const rowById = prepared((db) =>
+  sweepRows(db)
+    .where(eq(sweeps.id, sql.placeholder('id')))
+    .prepare(),
+);
+
 export function findSweepRow(db: Database, id: number): SweepRow | undefined {
-  return sweepRows(db).where(eq(sweeps.id, id)).get();
+  return rowById(db).get({ id });
 }
 
 /** Sweeps that pass the filter, newest import first. */

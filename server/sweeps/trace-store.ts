@@ -1,12 +1,21 @@
 import type { GridDescription } from '@shared/traces/frequency-grid';
-import { eq, inArray } from 'drizzle-orm';
+import { eq, inArray, sql } from 'drizzle-orm';
+import { prepared } from '../db/prepared';
 import type { Database } from '../db/open-database';
 import { frequencyGrids, sweeps, sweepTraces } from '../db/schema';
 
 export type StoredTrace = typeof sweepTraces.$inferSelect;
 
+const gridByHash = prepared((db) =>
+  db
+    .select({ id: frequencyGrids.id })
+    .from(frequencyGrids)
+    .where(eq(frequencyGrids.hash, sql.placeholder('hash')))
+    .prepare(),
+);
+
 export function findGridId(db: Database, hash: string): number | undefined {
-  return db.select({ id: frequencyGrids.id }).from(frequencyGrids).where(eq(frequencyGrids.hash, hash)).get()?.id;
+  return gridByHash(db).get({ hash })?.id;
 }
 
 export function insertGrid(db: Database, hash: string, grid: GridDescription, frequencies: Buffer): number {
@@ -22,8 +31,19 @@ export function gridFrequencies(db: Database, gridId: number): Buffer | undefine
     .get()?.frequencies;
 }
 
+const traceInsertion = prepared((db) =>
+  db
+    .insert(sweepTraces)
+    .values({
+      sweepId: sql.placeholder('sweepId'),
+      encoding: sql.placeholder('encoding'),
+      levels: sql.placeholder('levels'),
+    })
+    .prepare(),
+);
+
 export function insertTrace(db: Database, trace: StoredTrace): void {
-  db.insert(sweepTraces).values(trace).run();
+  traceInsertion(db).run({ ...trace });
 }
 
 /** Traces with the grid each is on, in no order. */
