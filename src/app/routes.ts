@@ -2,9 +2,15 @@ import { Routes } from '@angular/router';
 import { administratorsOnly, membersOnly, signedInOnly } from './session/session-guards';
 import { toLastTeam } from './session/to-last-team';
 
-/** Every feature is one lazy folder; the shell frames all pages that need a sign-in. */
+/** Every feature is one lazy folder; the shell frames all pages that need a sign-in and answers every unknown address. */
 export const routes: Routes = [
   { path: '', loadChildren: () => import('./session/session-routes').then((m) => m.sessionRoutes) },
+  {
+    path: 'mailbox',
+    title: 'Mailbox',
+    loadComponent: () => import('./shell/open-frame').then((m) => m.OpenFrame),
+    loadChildren: () => import('./mailbox/mailbox-routes').then((m) => m.mailboxRoutes),
+  },
   {
     path: '',
     loadComponent: () => import('./shell/shell').then((m) => m.Shell),
@@ -46,17 +52,11 @@ export const routes: Routes = [
         title: 'Your account',
         loadComponent: () => import('./session/account-page').then((m) => m.AccountPage),
       },
+      {
+        path: '**',
+        title: 'Page not found',
+        loadComponent: () => import('./shell/page-not-found').then((m) => m.PageNotFound),
+      },
     ],
-  },
-  {
-    path: 'mailbox',
-    title: 'Mailbox',
-    loadComponent: () => import('./shell/open-frame').then((m) => m.OpenFrame),
-    loadChildren: () => import('./mailbox/mailbox-routes').then((m) => m.mailboxRoutes),
-  },
-  {
-    path: '**',
-    title: 'Page not found',
-    loadComponent: () => import('./shell/page-not-found').then((m) => m.PageNotFound),
   },
 ];

@@ -12,10 +12,9 @@ type DemoSignIn = SessionView['demoSignIns'][number];
     <ul>
       @for (signIn of signIns(); track signIn.email) {
         <li>
-          <button type="button" [disabled]="disabled()" (click)="chosen.emit(signIn)">
+          <button type="button" [title]="signIn.email" [disabled]="disabled()" (click)="chosen.emit(signIn)">
             <span class="name">{{ signIn.name }}</span>
             <span class="role">{{ signIn.role }}</span>
-            <span class="email">{{ signIn.email }}</span>
           </button>
         </li>
       }
@@ -35,20 +34,23 @@ type DemoSignIn = SessionView['demoSignIns'][number];
       line-height: 20px;
     }
     ul {
-      display: grid;
-      gap: 4px;
       margin: 0;
       padding: 0;
-      list-style: none;
-    }
-    button {
-      display: grid;
-      grid-template-columns: 1fr auto;
-      gap: 0 12px;
-      width: 100%;
-      padding: 6px 12px;
       border: 1px solid var(--sl-hairline);
       border-radius: 6px;
+      list-style: none;
+      overflow: hidden;
+    }
+    li:not(:last-child) {
+      border-bottom: 1px solid var(--sl-hairline);
+    }
+    button {
+      display: flex;
+      gap: 12px;
+      justify-content: space-between;
+      width: 100%;
+      padding: 5px 12px;
+      border: 0;
       background: none;
       color: inherit;
       font: inherit;
@@ -57,22 +59,17 @@ type DemoSignIn = SessionView['demoSignIns'][number];
       cursor: pointer;
     }
     button:hover:enabled {
-      border-color: var(--sl-accent);
-      background: var(--sl-surface-low);
+      background: var(--sl-surface-high);
+    }
+    button:focus-visible {
+      outline-offset: -2px;
     }
     .name {
       font-weight: 500;
     }
     .role {
-      color: var(--sl-accent);
-    }
-    .email {
-      grid-column: 1 / -1;
-      overflow: hidden;
       color: var(--sl-ink-muted);
-      font-size: 12px;
-      line-height: 16px;
-      text-overflow: ellipsis;
+      text-align: end;
     }
   `,
 })

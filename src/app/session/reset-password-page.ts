@@ -80,7 +80,11 @@ export class ResetPasswordPage {
         ),
       )
       .subscribe({
-        next: () => this.done.set(true),
+        next: () => {
+          // The server ended every session of this person, the one of this browser too.
+          this.session.forget();
+          this.done.set(true);
+        },
         error: (error: unknown) => {
           const problem = problemOf(error);
           applyProblem(this.form, problem);

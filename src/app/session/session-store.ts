@@ -61,11 +61,6 @@ export class SessionStore {
   }
 
   private leave(path: string): Observable<void> {
-    return this.http.delete(path).pipe(
-      tap(() => this.forget()),
-      // The old CSRF token died with the session; the next form needs a fresh one.
-      switchMap(() => this.http.get('/api/csrf')),
-      map(() => undefined),
-    );
+    return this.http.delete(path).pipe(map(() => this.forget()));
   }
 }

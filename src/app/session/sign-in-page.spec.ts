@@ -42,7 +42,7 @@ describe('SignInPage', () => {
     expect(real.element.textContent).not.toContain('demo');
     TestBed.resetTestingModule();
     const demo = await show({ ...NOBODY, demo: true, mailbox: true, demoSignIns: [TEO] });
-    expect(demo.element.querySelector('app-demo-sign-ins')?.textContent).toContain('teo@quaywright.example');
+    expect(demo.element.querySelector('app-demo-sign-ins')?.textContent).toContain('Teo');
     expect(demo.element.querySelector('a[href="/mailbox"]')).not.toBeNull();
   });
 

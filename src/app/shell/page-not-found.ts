@@ -8,7 +8,7 @@ import { EmptyState } from '../ui/empty-state';
   imports: [EmptyState, MatButton, RouterLink],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <main class="page">
+    <div class="page">
       <app-empty-state
         icon="search"
         heading="There is no such page"
@@ -16,7 +16,7 @@ import { EmptyState } from '../ui/empty-state';
       >
         <a mat-flat-button routerLink="/">Go to the overview</a>
       </app-empty-state>
-    </main>
+    </div>
   `,
 })
 export class PageNotFound {}

@@ -38,10 +38,12 @@ import { ThemeSwitch } from './theme-switch';
       background: var(--sl-surface);
     }
     .home {
+      display: flex;
       margin-inline-end: 12px;
       text-decoration: none;
     }
     app-team-switcher {
+      display: flex;
       min-width: 0;
     }
     .gap {

@@ -23,7 +23,7 @@ it('puts each error beside its field, nested ones too, keeps what was typed and 
     ],
   });
   expect(shown).toEqual(['email', 'switching.0.frequencyHz']);
-  expect(errorText(form.controls.email.errors ?? {})).toBe('Is no e-mail address.');
+  expect(errorText(form.controls.email.errors ?? {})).toBe('This is no e-mail address.');
   expect(form.controls.email.touched).toBe(true);
   expect(form.getRawValue()).toEqual({ email: 'mira@quay', switching: [{ frequencyHz: -1 }] });
 });

@@ -27,7 +27,9 @@ export function errorText(errors: ValidationErrors): string {
   return typeof first === 'string' ? sentence(first) : 'Please check this.';
 }
 
+/** Messages of the server go on from the name of the field: "is no e-mail address". */
 function sentence(text: string): string {
-  const capital = text.charAt(0).toUpperCase() + text.slice(1);
+  const whole = /^(is|are|was|has|must|may|does|needs|lies)\b/.test(text) ? `This ${text}` : text;
+  const capital = whole.charAt(0).toUpperCase() + whole.slice(1);
   return /[.!?]$/.test(capital) ? capital : `${capital}.`;
 }

@@ -12,7 +12,7 @@ import { adviceOn } from './problem';
   template: `
     <mat-icon svgIcon="error" />
     <div class="text">
-      <p class="happened">{{ problem().detail }}</p>
+      <p class="happened">{{ happened() }}</p>
       @if (place(); as place) {
         <p class="number">{{ place }}</p>
       }
@@ -68,6 +68,11 @@ export class ProblemBanner {
   readonly shownPaths = input<readonly string[]>([]);
 
   protected readonly advice = computed(() => adviceOn(this.problem()));
+  protected readonly happened = computed(() => {
+    const { errors, detail } = this.problem();
+    return errors?.length ? 'Some fields need another look.' : detail;
+  });
+  /** Errors that no field shows. */
   protected readonly loose = computed(() =>
     (this.problem().errors ?? []).filter((error) => !this.shownPaths().includes(error.path)),
   );

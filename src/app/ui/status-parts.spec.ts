@@ -72,7 +72,7 @@ describe('TimeStamp', () => {
 });
 
 describe('ProblemBanner', () => {
-  it('says what happened and where, what was kept and what to do, without repeating errors shown at their fields', async () => {
+  it('says what happened and where, what was kept and what to do', async () => {
     const element = await show(ProblemBanner, {
       problem: {
         type: '/problems/unreadable',
@@ -84,21 +84,35 @@ describe('ProblemBanner', () => {
         found: 'n/a',
         expected: 'a level',
         advice: 'Check the decimal mark.',
-        errors: [
-          { path: 'email', message: 'shown there' },
-          { path: 'tags.bench', message: 'does not exist' },
-        ],
       },
       kept: 'Nothing was stored.',
-      shownPaths: ['email'],
     });
     expect([...element.querySelectorAll('p')].map(({ textContent }) => textContent?.trim())).toEqual([
       'sweep.csv cannot be read.',
       'Line 14, column 3: found "n/a", expected a level',
-      'tags.bench: does not exist',
       'Nothing was stored.',
       'Check the decimal mark.',
     ]);
     expect(element.getAttribute('role')).toBe('alert');
+  });
+
+  it('does not repeat errors that stand beside their fields', async () => {
+    const element = await show(ProblemBanner, {
+      problem: {
+        type: '/problems/invalid',
+        title: 'Not valid',
+        status: 400,
+        detail: 'email: is no e-mail address',
+        errors: [
+          { path: 'email', message: 'is no e-mail address' },
+          { path: 'tags.bench', message: 'does not exist' },
+        ],
+      },
+      shownPaths: ['email'],
+    });
+    expect([...element.querySelectorAll('p')].map(({ textContent }) => textContent?.trim())).toEqual([
+      'Some fields need another look.',
+      'tags.bench: does not exist',
+    ]);
   });
 });
