@@ -1,3 +1,4 @@
+import { setTimeout } from 'node:timers/promises';
 import type { Context } from '../server/context';
 import { claimRun } from '../server/queue/claim-run';
 import { HeldRun, RunLostError } from '../server/queue/held-run';
@@ -41,21 +42,7 @@ export async function startWorker(
   const pulse = setInterval(() => beat(context, worker, startedAt), BEAT_EVERY_MS);
   while (!signal.aborted) {
     const hasWorked = await workOnce(context, worker, jobs);
-    if (!hasWorked) await pause(POLL_MS, signal);
+    if (!hasWorked) await setTimeout(POLL_MS, undefined, { signal }).catch(() => undefined);
   }
   clearInterval(pulse);
-}
-
-function pause(durationMs: number, signal: AbortSignal): Promise<void> {
-  return new Promise((resolve) => {
-    const timer = setTimeout(resolve, durationMs);
-    signal.addEventListener(
-      'abort',
-      () => {
-        clearTimeout(timer);
-        resolve();
-      },
-      { once: true },
-    );
-  });
 }

@@ -31,7 +31,8 @@ describe('readConfig', () => {
     expect(() => readConfig({ ...production, STRANDLINE_DEMO: 'on' })).toThrow('STRANDLINE_DEMO');
   });
 
-  it('names the offending variable', () => {
-    expect(() => readConfig({ PORT: 'eighty' })).toThrow('PORT');
+  it('names the offending variable and value, but never a secret', () => {
+    expect(() => readConfig({ PORT: 'eighty' })).toThrow(/PORT: .*found "eighty"/);
+    expect(() => readConfig({ SESSION_SECRET: 'too short' })).toThrow(/^((?!too short).)*$/s);
   });
 });

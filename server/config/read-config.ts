@@ -48,7 +48,9 @@ export function readConfig(environment: NodeJS.ProcessEnv): Config {
   const given = Object.fromEntries(Object.entries(environment).filter(([, value]) => value !== ''));
   const parsed = Environment.safeParse(given);
   if (!parsed.success) {
-    const lines = parsed.error.issues.map((issue) => `${issue.path.join('.')}: ${issue.message}`);
+    const lines = parsed.error.issues.map(
+      ({ path, message }) => `${path.join('.')}: ${message}${found(given, path[0])}`,
+    );
     throw new Error(`The configuration is wrong.\n${lines.join('\n')}`);
   }
   const values = parsed.data;
@@ -72,6 +74,12 @@ export function readConfig(environment: NodeJS.ProcessEnv): Config {
     trustedProxies: values.TRUST_PROXY,
     logLevel: values.LOG_LEVEL,
   });
+}
+
+/** The offending value, unless it may hold a password. */
+function found(given: Record<string, string | undefined>, name: PropertyKey | undefined): string {
+  const isSecret = name === 'SESSION_SECRET' || name === 'SMTP_URL';
+  return isSecret || typeof name !== 'string' ? '' : `, found "${given[name]}"`;
 }
 
 function refuseUnsafeProduction(values: z.infer<typeof Environment>): void {
