@@ -14,7 +14,7 @@ export interface RolledSweep {
 }
 
 export type RollUp = Pick<
-  typeof builds.$inferInsert,
+  typeof builds.$inferSelect,
   'sweepCount' | 'worstMarginDb' | 'worstFrequencyHz' | 'worstSweepId'
 >;
 
@@ -59,17 +59,21 @@ export function updateRollUp(db: Database, buildId: number, rollUp: RollUp): voi
   rollUpUpdate(db).run({ buildId, ...rollUp });
 }
 
-const cellsUpsert = prepared((db) => {
-  const [buildId, series, cells, tile] = ['buildId', 'series', 'cells', 'tile'].map((name) => sql.placeholder(name));
-  return db
+const cellsUpsert = prepared((db) =>
+  db
     .insert(buildCells)
-    .values({ buildId, series, cells, tile })
+    .values({
+      buildId: sql.placeholder('buildId'),
+      series: sql.placeholder('series'),
+      cells: sql.placeholder('cells'),
+      tile: sql.placeholder('tile'),
+    })
     .onConflictDoUpdate({
       target: buildCells.buildId,
       set: { series: sql`excluded.series`, cells: sql`excluded.cells`, tile: sql`excluded.tile` },
     })
-    .prepare();
-});
+    .prepare(),
+);
 
 export function upsertBuildCells(db: Database, row: typeof buildCells.$inferInsert): void {
   cellsUpsert(db).run({ ...row });

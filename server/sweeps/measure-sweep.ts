@@ -1,10 +1,10 @@
 import type { SweepTags } from '@shared/contracts/sweeps';
-import { describeGrid, type GridDescription } from '@shared/traces/frequency-grid';
+import type { GridDescription } from '@shared/traces/frequency-grid';
 import { sweepMargins } from '@shared/traces/margins';
 import type { FoundProduct } from '../products/find-product';
 import { sha256 } from './original-files';
 import { packTrace } from './pack-trace';
-import { plannedLine, preparedGrid } from './prepared-grids';
+import { type KnownGrid, knownGrid, type PlannedLine, plannedLine } from './prepared-grids';
 import { readSweepFile, type SweepReading } from './read-sweep-file';
 import type { NewSweep } from './sweep-store';
 import type { StoredTrace } from './trace-store';
@@ -31,34 +31,29 @@ export interface MeasuredSweep extends SweepReading {
 }
 
 /** Reads the file and works out everything about the sweep that needs no database. */
-export function measureSweep(bytes: Uint8Array, tags: SweepTags, found: FoundProduct): MeasuredSweep {
+export function measureSweep(bytes: Uint8Array, tags: SweepTags, { product, team }: FoundProduct): MeasuredSweep {
   const { reading, trace } = readSweepFile(bytes, tags);
   const { frequenciesHz } = reading;
   const gridHash = sha256(bytesOf(frequenciesHz));
+  const planned = plannedLine(product.limitSetKey, tags.detector);
+  const grid = knownGrid(gridHash, frequenciesHz, planned, team.bands);
   return {
     reading,
     trace,
     gridHash,
-    grid: describeGrid(frequenciesHz),
+    grid: grid.description,
     readingHash: sha256(bytesOf(trace.levelsDbuv)),
-    margins: marginColumns(gridHash, frequenciesHz, trace.levelsDbuv, tags, found),
+    margins: marginColumns(trace.levelsDbuv, planned, grid),
     packed: packTrace(trace.levelsDbuv),
   };
 }
 
-/** Margins of levels against the limit plan of their product. */
-export function marginColumns(
-  gridHash: string,
-  frequenciesHz: Float64Array,
-  levelsDbuv: Float32Array,
-  { detector }: Pick<SweepTags, 'detector'>,
-  { product, team }: FoundProduct,
-): MarginColumns {
-  const planned = plannedLine(product.limitSetKey, detector);
-  const { worst, bands, cells } = sweepMargins(levelsDbuv, preparedGrid(gridHash, frequenciesHz, planned, team.bands));
+/** Margins of levels against the planned line of their product. */
+export function marginColumns(levelsDbuv: Float32Array, { set }: PlannedLine, grid: KnownGrid): MarginColumns {
+  const { worst, bands, cells } = sweepMargins(levelsDbuv, grid);
   return {
-    limitSetKey: planned.set.key,
-    limitSetVersion: planned.set.version,
+    limitSetKey: set.key,
+    limitSetVersion: set.version,
     worstMarginDb: worst?.marginDb ?? null,
     worstFrequencyHz: worst?.frequencyHz ?? null,
     worstLevelDbuv: worst?.levelDbuv ?? null,

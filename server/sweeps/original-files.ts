@@ -14,13 +14,16 @@ export function sha256(bytes: Uint8Array): string {
  * and swept away by the prune job.
  */
 export class OriginalFiles {
+  /** Folders that are known to be there. */
+  private readonly folders = new Set<string>();
+
   constructor(private readonly folder: string) {}
 
   /** Keeps the bytes; the same bytes twice are one file. Returns their SHA-256. */
   keep(bytes: Uint8Array, hash = sha256(bytes)): string {
     const path = this.pathOf(hash);
     if (existsSync(path)) return hash;
-    mkdirSync(dirname(path), { recursive: true });
+    this.makeFolder(dirname(path));
     const beside = `${path}.${randomUUID()}.part`;
     // Level 1: three quarters of the best saving at a third of its time.
     writeFileSync(beside, gzipSync(bytes, { level: 1 }));
@@ -35,6 +38,12 @@ export class OriginalFiles {
     const bytes = gunzipSync(readFileSync(this.pathOf(hash)));
     if (sha256(bytes) !== hash) throw new Error(`the original ${hash} has changed on disk`);
     return bytes;
+  }
+
+  private makeFolder(folder: string): void {
+    if (this.folders.has(folder)) return;
+    mkdirSync(folder, { recursive: true });
+    this.folders.add(folder);
   }
 
   /** Absolute path of the file with this SHA-256. */

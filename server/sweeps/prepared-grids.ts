@@ -4,6 +4,7 @@ import { cellEdgesHz } from '@shared/limits/cells';
 import type { LimitLine } from '@shared/limits/limit-line';
 import type { LimitSet } from '@shared/limits/limit-set';
 import { findLimitSet, lineForDetector } from '@shared/limits/limit-sets';
+import { describeGrid, type GridDescription } from '@shared/traces/frequency-grid';
 import { type PreparedGrid, prepareGrid } from '@shared/traces/margins';
 import type { TeamBand } from '../db/schema/teams';
 import { ServiceError } from '../service-error';
@@ -11,7 +12,12 @@ import { ServiceError } from '../service-error';
 /** Most grids a bench park uses at once, times detectors; one of 60,000 points takes 1 MB. */
 const MOST_KEPT = 48;
 const CELL_EDGES_HZ = cellEdgesHz();
-const kept = new Map<string, PreparedGrid>();
+const kept = new Map<string, KnownGrid>();
+
+/** A grid made ready for margins, with what identifies it to people. */
+export interface KnownGrid extends PreparedGrid {
+  readonly description: GridDescription;
+}
 
 export interface PlannedLine {
   set: LimitSet;
@@ -31,13 +37,13 @@ export function plannedLine(limitSetKey: string, detector: Detector): PlannedLin
   return { set, line };
 }
 
-/** The grid made ready for margins; the least recently used are forgotten. */
-export function preparedGrid(
+/** The grid made ready for margins against a limit line; the least recently used are forgotten. */
+export function knownGrid(
   gridHash: string,
   frequenciesHz: Float64Array,
   { set, line }: PlannedLine,
   teamBands: readonly TeamBand[],
-): PreparedGrid {
+): KnownGrid {
   const key = JSON.stringify([gridHash, set.key, set.version, line.detector, teamBands]);
   const found = kept.get(key);
   if (found !== undefined) {
@@ -47,8 +53,9 @@ export function preparedGrid(
   }
   const own = teamBands.map(({ name, fromHz, toHz }) => ({ key: name, fromHz, toHz }));
   const prepared = prepareGrid(frequenciesHz, line, bandsFor(line, own), CELL_EDGES_HZ);
-  kept.set(key, prepared);
+  const known = { ...prepared, description: describeGrid(frequenciesHz) };
+  kept.set(key, known);
   const oldest = kept.keys().next();
   if (kept.size > MOST_KEPT && !oldest.done) kept.delete(oldest.value);
-  return prepared;
+  return known;
 }

@@ -1,7 +1,6 @@
 import { mkdirSync } from 'node:fs';
 import { join } from 'node:path';
 import { SweepTags } from '@shared/contracts/sweeps';
-import { describeGrid } from '@shared/traces/frequency-grid';
 import { sweepMargins } from '@shared/traces/margins';
 import { readDelimited } from '@shared/traces/read-delimited';
 import SqliteDatabase from 'better-sqlite3';
@@ -10,7 +9,7 @@ import { importSweep } from '../../server/sweeps/import-sweep';
 import { bytesOf } from '../../server/sweeps/measure-sweep';
 import { OriginalFiles, sha256 } from '../../server/sweeps/original-files';
 import { packTrace } from '../../server/sweeps/pack-trace';
-import { plannedLine, preparedGrid } from '../../server/sweeps/prepared-grids';
+import { knownGrid, plannedLine } from '../../server/sweeps/prepared-grids';
 import { openBenchContext } from './bench-context';
 import { type Measured, measureRounds } from './measure-rounds';
 import { syntheticTags } from './synthetic-sweep';
@@ -22,7 +21,7 @@ export interface IngestStages {
   /** SHA-256 of the file, which an import that knows duplicates needs. */
   hash: Measured;
   parse: Measured;
-  /** Hashes of grid and levels, grid description, margins of bands and cells on a prepared grid. */
+  /** Hashes of grid and levels, margins of bands and cells on a prepared grid. */
   margins: Measured;
   pack: Measured;
   /** The original, compressed and written. */
@@ -70,8 +69,7 @@ export function measureStages(files: readonly Buffer[]): IngestStages {
     margins: each(() => {
       const gridHash = sha256(bytesOf(frequenciesHz));
       sha256(bytesOf(levels));
-      describeGrid(frequenciesHz);
-      sweepMargins(levels, preparedGrid(gridHash, frequenciesHz, planned, []));
+      sweepMargins(levels, knownGrid(gridHash, frequenciesHz, planned, []));
     }),
     pack: each(() => void packTrace(levels)),
     keep: blocks((block) => {

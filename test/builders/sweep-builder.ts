@@ -1,5 +1,5 @@
 import { SweepTags, type SweepTagsInput } from '@shared/contracts/sweeps';
-import { describeGrid, firstIndexAtOrAbove } from '@shared/traces/frequency-grid';
+import { firstIndexAtOrAbove } from '@shared/traces/frequency-grid';
 import { eq } from 'drizzle-orm';
 import type { Actor } from '../../server/actor';
 import type { Bench } from '../../server/benches/find-bench';
@@ -14,6 +14,7 @@ import { type ImportedSweep, importSweep } from '../../server/sweeps/import-swee
 import { bytesOf, marginColumns } from '../../server/sweeps/measure-sweep';
 import { sha256 } from '../../server/sweeps/original-files';
 import { packTrace } from '../../server/sweeps/pack-trace';
+import { knownGrid, plannedLine } from '../../server/sweeps/prepared-grids';
 import { insertSweep } from '../../server/sweeps/sweep-store';
 import { findGridId, insertGrid, insertTrace } from '../../server/sweeps/trace-store';
 
@@ -114,6 +115,8 @@ export function buildSweep(
   const frequenciesHz = shape.frequenciesHz ?? GRID;
   const levels = buildLevels(shape);
   const gridHash = sha256(bytesOf(frequenciesHz));
+  const planned = plannedLine(product.limitSetKey, tags.detector);
+  const grid = knownGrid(gridHash, frequenciesHz, planned, team.bands);
   const sweepId = insertSweep(db, {
     teamId: team.id,
     productId: product.id,
@@ -129,7 +132,7 @@ export function buildSweep(
     rbwHz: tags.rbwHz ?? null,
     attenuationDb: tags.attenuationDb ?? null,
     correction: tags.corrected ? 'inFile' : 'none',
-    gridId: findGridId(db, gridHash) ?? insertGrid(db, gridHash, describeGrid(frequenciesHz), bytesOf(frequenciesHz)),
+    gridId: findGridId(db, gridHash) ?? insertGrid(db, gridHash, grid.description, bytesOf(frequenciesHz)),
     originalSha256: sha256(Buffer.from(`built ${serial}`)),
     fileName: 'built.csv',
     traceNumber: 1,
@@ -137,10 +140,13 @@ export function buildSweep(
     levelUnit: 'dBuV',
     identity: `built ${serial}`,
     readingHash: sha256(bytesOf(levels)),
-    ...marginColumns(gridHash, frequenciesHz, levels, tags, { product, team, isShared: false }),
+    remarks: [],
+    ...marginColumns(levels, planned, grid),
     importedAt: context.now(),
     importedByKind: 'job',
+    importedById: null,
     importedByName: JOB.name,
+    batchId: null,
   });
   insertTrace(db, { sweepId, ...packTrace(levels) });
   rollUpBuild(context, build.id);
