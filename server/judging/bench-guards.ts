@@ -6,28 +6,21 @@ import type { GuardHit } from '@shared/judging/guard-hit';
 import { cellEdgesHz } from '@shared/limits/cells';
 import { limitAt } from '@shared/limits/limit-line';
 import { meanCells } from '@shared/traces/mean-cells';
-import type { GatheredSeries } from './gather-series';
+import type { GatheredBand, GatheredSeries } from './gather-series';
 import type { JudgedSweep } from './judged-sweep-store';
 import { runKey } from './run-margin-of';
 import { type SeriesPlan, seriesPlan } from './series-plan';
 
-/** The series with what its own sweeps say about the bench: a whole curve moved, detectors out of order. */
-export function withBenchGuards(
-  all: readonly GatheredSeries[],
-  limitSetKey: string,
-  buildSweeps: readonly JudgedSweep[],
-): GatheredSeries[] {
+/** Tells, of a band of a series, what the sweeps of the two sides say about the bench. */
+export type ReadBenchHits = (series: GatheredSeries, band: GatheredBand) => GuardHit[];
+
+/** Prepares to tell whether a whole curve moved, or detectors are out of order. */
+export function benchHits(limitSetKey: string, buildSweeps: readonly JudgedSweep[]): ReadBenchHits {
   const orderHits = detectorOrderHits(limitSetKey, buildSweeps);
-  return all.map((series) => {
-    const swapped = orderHits.get(channelKey(series))?.get(series.detector) ?? [];
-    return {
-      ...series,
-      bands: series.bands.map((band) => {
-        const guards = [...constantOffsetHits(band.buildSweeps, band.referenceSweeps), ...swapped];
-        return { ...band, input: { ...band.input, guards } };
-      }),
-    };
-  });
+  return (series, band) => [
+    ...constantOffsetHits(band.buildSweeps, band.referenceSweeps),
+    ...(orderHits.get(channelKey(series))?.get(series.detector) ?? []),
+  ];
 }
 
 function constantOffsetHits(build: readonly JudgedSweep[], reference: readonly JudgedSweep[]): GuardHit[] {

@@ -7,15 +7,14 @@ import type { Actor } from '../actor';
 import type { Context } from '../context';
 import { withTransaction } from '../db/with-transaction';
 import { settleDrops } from '../drops/settle-drops';
-import { withBenchGuards } from './bench-guards';
 import { type BuildRecord, readBuildRecord } from './build-record';
 import { dropCases } from './drop-cases';
 import { type GatheredSeries, gatherSeries } from './gather-series';
 import { gravestVerdict } from './gravest-verdict';
+import { guardSeries } from './guard-series';
 import { updateJudgedBuild } from './judged-build-store';
 import { markStale } from './mark-stale';
 import { rejudgeNeighbours } from './rejudge-neighbours';
-import { withSameDayGuards } from './same-day-guard';
 import { traceFacts } from './trace-facts';
 import { deleteVerdicts, listVerdicts, upsertVerdict, type VerdictRow } from './verdict-store';
 
@@ -55,10 +54,9 @@ function judge(
   context: Context,
   record: BuildRecord,
 ): { series: readonly GatheredSeries[]; judgements: BandJudgement[] } {
-  const gathered = gatherSeries(record, traceFacts(context, record));
-  const series = withBenchGuards(gathered, record.product.limitSetKey, record.sweeps);
+  const series = gatherSeries(record, traceFacts(context, record));
   const judgements = judgeBuild(buildInput(record, series));
-  const guarded = withSameDayGuards(context, record, series, judgements);
+  const guarded = guardSeries(context, record, series, judgements);
   return guarded ? { series: guarded, judgements: judgeBuild(buildInput(record, guarded)) } : { series, judgements };
 }
 

@@ -1,46 +1,26 @@
 import { groupBy } from '@shared/collections/group-by';
 import type { BandJudgement } from '@shared/judging/band-judgement';
 import { MAX_POOLED_BUILDS } from '@shared/judging/choose-reference';
+import type { GuardHit } from '@shared/judging/guard-hit';
 import { type OtherProductShift, sameDayShift } from '@shared/judging/same-day-shift';
 import { mean } from 'simple-statistics';
 import type { Context } from '../context';
 import type { BuildRecord } from './build-record';
-import { type GatheredSeries, seriesKey } from './gather-series';
 import { type DaySweep, listOtherProductSweeps, listSweepsBefore } from './same-day-store';
 
 /** Sweeps no further apart belong to one day at the bench, whatever the calendar of its time zone says. */
 const SAME_DAY_MS = 12 * 3600_000;
 
+/** Tells whether other products moved like a band did. */
+export type ReadSameDayHit = (judgement: BandJudgement) => GuardHit | null;
+
 /**
- * Adds to every changed band what other products measured on the same bench and day did. Their change is taken from the
- * sweeps themselves, not from verdicts, so that it does not matter which product is judged first.
- *
- * @returns the series with the guards, or null when no other product moved along
+ * Prepares to tell what other products measured on the same bench and day did. Their change is taken from the sweeps
+ * themselves, not from verdicts, so that it does not matter which product is judged first.
  */
-export function withSameDayGuards(
-  context: Context,
-  record: BuildRecord,
-  all: readonly GatheredSeries[],
-  judgements: readonly BandJudgement[],
-): GatheredSeries[] | null {
-  const changed = judgements.filter(({ verdict }) => verdict === 'lost' || verdict === 'gained');
-  if (changed.length === 0) return null;
+export function sameDayHits(context: Context, record: BuildRecord): ReadSameDayHit {
   const others = otherChanges(context, record);
-  const hits = new Map(
-    changed.flatMap((judgement) => {
-      const shifts = shiftsOf(others, judgement);
-      const hit = sameDayShift(judgement.differenceDb ?? 0, shifts, record.thresholdDb);
-      return hit ? [[`${seriesKey(judgement)} ${judgement.band}`, hit] as const] : [];
-    }),
-  );
-  if (hits.size === 0) return null;
-  return all.map((series) => ({
-    ...series,
-    bands: series.bands.map((band) => {
-      const hit = hits.get(`${seriesKey(series)} ${band.input.band}`);
-      return hit ? { ...band, input: { ...band.input, guards: [...band.input.guards, hit] } } : band;
-    }),
-  }));
+  return (judgement) => sameDayShift(judgement.differenceDb ?? 0, shiftsOf(others, judgement), record.thresholdDb);
 }
 
 /** Builds of other products measured on the same benches within the day. */
