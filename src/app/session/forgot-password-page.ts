@@ -70,7 +70,7 @@ export class ForgotPasswordPage {
     const { email } = this.form.getRawValue();
     this.session
       .load()
-      .pipe(switchMap(() => this.http.post('/api/password-resets', { email })))
+      .pipe(switchMap(() => this.http.post('/api/password-resets', { email }, { responseType: 'text' })))
       .subscribe({
         next: () => this.sentTo.set(email),
         error: (error: unknown) => {

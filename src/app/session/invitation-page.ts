@@ -45,7 +45,7 @@ export class InvitationPage {
   protected readonly invitation = httpResource<InvitationView>(() => this.path());
   protected readonly invalid = computed(() => {
     const error = this.invitation.error();
-    return error ? problemOf(error) : null;
+    return error ? { advice: 'Ask the lead of the team for a new one.', ...problemOf(error) } : null;
   });
 
   protected readonly least = PASSWORD_LENGTH;

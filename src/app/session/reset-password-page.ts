@@ -88,7 +88,7 @@ export class ResetPasswordPage {
         error: (error: unknown) => {
           const problem = problemOf(error);
           applyProblem(this.form, problem);
-          this.problem.set(problem);
+          this.problem.set({ ...problem, advice: problem.advice ?? '' });
           this.busy.set(false);
         },
       });

@@ -3,8 +3,6 @@ import { computed, inject, Injectable, signal } from '@angular/core';
 import { catchError, map, Observable, of, shareReplay, switchMap, tap } from 'rxjs';
 import type { SessionTeam, SessionView } from '@shared/contracts/session';
 
-const NOBODY: SessionView = { person: null, teams: [], demo: false, mailbox: false, demoSignIns: [] };
-
 /** Who is signed in and which teams they belong to; the single source for guards, shell and pages. */
 @Injectable({ providedIn: 'root' })
 export class SessionStore {
@@ -55,9 +53,10 @@ export class SessionStore {
     return this.leave('/api/session/everywhere');
   }
 
-  /** The server no longer knows this browser: keep what is true for everybody, drop the person. */
+  /** The session is over: the next `load` asks anew, with a fresh CSRF token for the next form. */
   forget(): void {
-    this.answer.update((session) => ({ ...(session ?? NOBODY), person: null, teams: [] }));
+    this.answer.set(undefined);
+    this.loading = undefined;
   }
 
   private leave(path: string): Observable<void> {

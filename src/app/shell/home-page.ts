@@ -11,6 +11,7 @@ import { EmptyState } from '../ui/empty-state';
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <div class="page">
+      <h1 class="visually-hidden">Welcome</h1>
       <app-empty-state
         icon="members"
         heading="You are in no team yet"

@@ -9,6 +9,7 @@ import { EmptyState } from '../ui/empty-state';
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <div class="page">
+      <h1 class="visually-hidden">Page not found</h1>
       <app-empty-state
         icon="search"
         heading="There is no such page"

@@ -1,5 +1,6 @@
 import { Pipe, PipeTransform } from '@angular/core';
 import type { AbstractControl, ValidationErrors } from '@angular/forms';
+import { asSentence } from './as-sentence';
 
 /** `<mat-error>{{ form.controls.email | fieldError }}</mat-error>`: the field's first error in plain words. */
 @Pipe({ name: 'fieldError', pure: false })
@@ -29,7 +30,5 @@ export function errorText(errors: ValidationErrors): string {
 
 /** Messages of the server go on from the name of the field: "is no e-mail address". */
 function sentence(text: string): string {
-  const whole = /^(is|are|was|has|must|may|does|needs|lies)\b/.test(text) ? `This ${text}` : text;
-  const capital = whole.charAt(0).toUpperCase() + whole.slice(1);
-  return /[.!?]$/.test(capital) ? capital : `${capital}.`;
+  return asSentence(/^(is|are|was|has|must|may|does|needs|lies)\b/.test(text) ? `This ${text}` : text);
 }

@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { MatIcon } from '@angular/material/icon';
 import type { Problem } from '@shared/contracts/problem';
+import { asSentence } from './as-sentence';
 import { adviceOn } from './problem';
 
 /** Says what happened, what was kept and what to do. Buttons to act go inside the tag. */
@@ -70,7 +71,7 @@ export class ProblemBanner {
   protected readonly advice = computed(() => adviceOn(this.problem()));
   protected readonly happened = computed(() => {
     const { errors, detail } = this.problem();
-    return errors?.length ? 'Some fields need another look.' : detail;
+    return errors?.length ? 'Some fields need another look.' : asSentence(detail);
   });
   /** Errors that no field shows. */
   protected readonly loose = computed(() =>

@@ -18,13 +18,18 @@ import type { ECharts, EChartsCoreOption } from 'echarts/core';
 import { NGX_ECHARTS_CONFIG, NgxEchartsConfig, NgxEchartsDirective } from 'ngx-echarts';
 import { Skeleton } from '../skeleton';
 import { CHART_ENGINE } from './chart-engine';
+import { chartPalette } from './chart-palette';
 import { ChartReadout, Readout } from './chart-readout';
 import type { ChartTable } from './chart-table';
 import { ChartTableView } from './chart-table-view';
+import { LegendEntry, pictureWithLegend } from './picture-with-legend';
 import { PlotMargins, PlotPoint, PlotRange } from './plot-margins';
 import { PlotPointer } from './plot-pointer';
 import { saveFile } from './save-file';
 import { toCsv } from './to-csv';
+
+/** Pixels of a downloaded picture for each of the screen. */
+const PNG_SCALE = 2;
 
 /**
  * Every chart of the product stands in this frame: canvas, pointer and keyboard, downloads and the table view.
@@ -54,6 +59,8 @@ export class ChartHost {
   readonly fileName = input('chart');
   /** Rows of the CSV download where it holds more than the table. */
   readonly csvRows = input<() => Iterable<readonly (string | number | null)[]>>();
+  /** Written above the chart in the downloaded picture. */
+  readonly legend = input<readonly LegendEntry[]>([]);
   readonly readout = input<Readout | null>(null);
   readonly canZoom = input(true);
   readonly isZoomed = input(false);
@@ -66,6 +73,7 @@ export class ChartHost {
   /** Width of the plot without its margins, px; told first and after every change. */
   readonly resized = output<number>();
 
+  private readonly palette = chartPalette();
   private readonly chart = signal<ECharts | null>(null);
   private readonly frame = viewChild.required<ElementRef<HTMLElement>>('frame');
   protected readonly widthPx = signal(0);
@@ -92,11 +100,10 @@ export class ChartHost {
   }
 
   protected savePng(): void {
-    const canvas = this.chart()?.renderToCanvas({
-      pixelRatio: 2,
-      backgroundColor: getComputedStyle(this.frame().nativeElement).backgroundColor,
-    });
-    canvas?.toBlob((blob) => {
+    const palette = this.palette();
+    const canvas = this.chart()?.renderToCanvas({ pixelRatio: PNG_SCALE, backgroundColor: palette.surface });
+    if (!canvas) return;
+    pictureWithLegend(canvas, this.legend(), PNG_SCALE, palette).toBlob((blob) => {
       if (blob) saveFile(`${this.fileName()}.png`, blob);
     });
   }

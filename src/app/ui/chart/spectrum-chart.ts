@@ -13,7 +13,7 @@ import { SpectrumPins } from './spectrum-pins';
 import { readTrace, SpectrumReading } from './spectrum-reading';
 import { spectrumCsvRows, spectrumTable } from './spectrum-table';
 import type { SpectrumLimit, SpectrumMark, SpectrumTrace, SpectrumView } from './spectrum-types';
-import { traceLooks } from './trace-look';
+import { type TraceLook, traceLooks } from './trace-look';
 
 /** The narrowest zoom: one part in two hundred of the frequency, about a receiver's bandwidth at 2 MHz. */
 const NARROWEST_RATIO = 1.005;
@@ -58,6 +58,9 @@ export class SpectrumChart {
   protected readonly looks = computed(() => traceLooks(this.traces(), this.palette()));
   protected readonly shown = computed(() => this.traces().filter(({ id }) => !this.hidden().has(id)));
   private readonly levels = computed(() => levelRange(this.traces(), this.limits()));
+  protected readonly legend = computed(() =>
+    this.shown().map((trace) => ({ label: trace.label, ...this.lookOf(trace) })),
+  );
   protected readonly isZoomed = computed(() => {
     const { fromHz, toHz } = this.view();
     return fromHz !== FULL_RANGE_HZ.fromHz || toHz !== FULL_RANGE_HZ.toHz;
@@ -66,7 +69,7 @@ export class SpectrumChart {
   protected readonly option = computed(() =>
     spectrumOption({
       traces: this.shown(),
-      looks: this.looks().filter((_, i) => !this.hidden().has(this.traces()[i].id)),
+      looks: this.shown().map((trace) => this.lookOf(trace)),
       limits: this.limits(),
       marks: this.marks(),
       pinsHz: this.view().pinsHz,
@@ -114,7 +117,7 @@ export class SpectrumChart {
     this.view().pinsHz.map((pinHz) => ({ pinHz, mark: this.marksNear(pinHz), readings: this.readAt(pinHz) })),
   );
 
-  protected readonly colourOf = (trace: SpectrumTrace): string => this.looks()[this.traces().indexOf(trace)].colour;
+  protected readonly colourOf = (trace: SpectrumTrace): string => this.lookOf(trace).colour;
 
   protected resize(widthPx: number): void {
     this.columns.set(widthPx);
@@ -208,6 +211,10 @@ export class SpectrumChart {
   private columnRatio(): number {
     const { fromHz, toHz } = this.view();
     return (toHz / fromHz) ** (1 / this.columns());
+  }
+
+  private lookOf(trace: SpectrumTrace): TraceLook {
+    return this.looks()[this.traces().indexOf(trace)];
   }
 
   private marksNear(frequencyHz: number): string {

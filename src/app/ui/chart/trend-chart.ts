@@ -60,6 +60,10 @@ export class TrendChart {
   protected readonly margins = TREND_MARGINS;
   protected readonly looks = computed(() => trendLooks(this.series(), this.palette()));
 
+  protected readonly legend = computed(() =>
+    this.series().map(({ label }, i) => ({ label, colour: this.looks()[i].colour, dash: 'solid' as const })),
+  );
+
   protected readonly option = computed(() =>
     trendOption({
       builds: this.builds(),
