@@ -14,8 +14,10 @@ import { openBenchContext } from './bench-context';
 import { type Measured, measureRounds } from './measure-rounds';
 import { syntheticTags } from './synthetic-sweep';
 
-/** Files a round; also how many share a transaction where several do. */
-const BLOCK = 20;
+/** Files a round. */
+const BLOCK = 100;
+/** How many share a transaction where several do. */
+const TOGETHER = 20;
 
 export interface IngestStages {
   /** SHA-256 of the file, which an import that knows duplicates needs. */
@@ -77,9 +79,13 @@ export function measureStages(files: readonly Buffer[]): IngestStages {
       for (const file of block) originals.keep(file, sha256(file));
     }),
     importOneEach: blocks(importAlone),
-    importTogether: blocks((block, first) => withTransaction(context.db, () => importInOne(block, first))),
+    importTogether: blocks((block, first) =>
+      inGroups(block, (group, offset) => withTransaction(context.db, () => importInOne(group, first + offset))),
+    ),
     insertOneEach: each(() => void raw.insert.run(blob)),
-    insertTogether: blocks((block) => raw.together(() => block.forEach(() => raw.insert.run(blob)))),
+    insertTogether: blocks((block) =>
+      inGroups(block, (group) => raw.together(() => group.forEach(() => raw.insert.run(blob)))),
+    ),
   };
   const measured = measureRounds(
     Object.entries(candidates).map(([name, run]) => ({ name, units: BLOCK, run })),
@@ -88,6 +94,10 @@ export function measureStages(files: readonly Buffer[]): IngestStages {
   raw.close();
   context.close();
   return Object.fromEntries(measured.map((one) => [one.name, one])) as unknown as IngestStages;
+}
+
+function inGroups(block: readonly Buffer[], work: (group: readonly Buffer[], offset: number) => void): void {
+  for (let offset = 0; offset < block.length; offset += TOGETHER) work(block.slice(offset, offset + TOGETHER), offset);
 }
 
 function openRaw(file: string) {

@@ -33,15 +33,20 @@ export function measureRounds(candidates: readonly Candidate[], rounds: number):
   return measured;
 }
 
-export function median(numbers: readonly number[]): number {
-  const sorted = [...numbers].sort((a, b) => a - b);
-  return sorted[sorted.length >> 1] ?? NaN;
+export function mean(numbers: readonly number[]): number {
+  return numbers.reduce((sum, one) => sum + one, 0) / numbers.length;
 }
 
-/** Median, least and greatest of the ratios of the rounds. */
-export function ratioOf(of: Measured, to: readonly Measured[]): { median: number; least: number; greatest: number } {
-  const ratios = of.cpuMs.map(
-    (cpuMs, round) => cpuMs / to.reduce((sum, floor) => sum + (floor.cpuMs[round] ?? NaN), 0),
-  );
-  return { median: median(ratios), least: Math.min(...ratios), greatest: Math.max(...ratios) };
+export interface Ratio {
+  whole: number;
+  least: number;
+  greatest: number;
+}
+
+/** CPU time of all rounds over that of the floors together, and the least and greatest ratio of a round. */
+export function ratioOf(of: Measured, floors: readonly Measured[]): Ratio {
+  const floorMs = of.cpuMs.map((_, round) => floors.reduce((sum, floor) => sum + (floor.cpuMs[round] ?? NaN), 0));
+  const ratios = of.cpuMs.map((cpuMs, round) => cpuMs / (floorMs[round] ?? NaN));
+  // Not the median of the rounds: the database moves its log into its file in some of them only.
+  return { whole: mean(of.cpuMs) / mean(floorMs), least: Math.min(...ratios), greatest: Math.max(...ratios) };
 }
