@@ -1,5 +1,5 @@
 import { asc, eq } from 'drizzle-orm';
-import { auditEntries, builds, dropEvents, drops, outboxMails, sweeps, verdicts } from '../../server/db/schema';
+import { auditEntries, builds, dropEvents, drops, outboxMails, sweeps, teams, verdicts } from '../../server/db/schema';
 import { markStale } from '../../server/judging/mark-stale';
 import {
   buildLaboratory,
@@ -132,6 +132,15 @@ describe('a loss', () => {
     expect(drop?.evidence.buildSweepIds).toHaveLength(3);
     expect(events().at(-1)).toMatchObject({ kind: 'evidence', at: context.now() });
     expect(events().at(-1)?.text).toMatch(/^Judged again \(3 sweeps of this build, were 2\): -6\.2 dB, was -6\.0 dB\./);
+  });
+
+  it('says in its history that another threshold judged it', async () => {
+    await runJudging(context);
+    context.db.update(teams).set({ thresholdDb: 3 }).run();
+    markStale(context, laboratory.product.id, 1);
+    await runJudging(context);
+    expect(events().at(-1)?.kind).toBe('evidence');
+    expect(events().at(-1)?.text).toMatch(/^Judged again \(threshold in dB 3, was 2\): -6\.0 dB, was -6\.0 dB\./);
   });
 
   it('keeps a decision made on it when the data change, and says so in its history once', async () => {
