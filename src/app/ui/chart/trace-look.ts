@@ -3,6 +3,7 @@ import type { SpectrumTrace } from './spectrum-types';
 
 export interface TraceLook {
   colour: string;
+  /** Lines wider than 1 px cost several times as much to draw without a graphics card, so only one trace is. */
   widthPx: number;
   /** Dash of the detector: PK solid, QP long dash, AV dotted. */
   dash: number[] | 'solid';
@@ -35,7 +36,7 @@ export function traceLooks(traces: readonly SpectrumTrace[], palette: ChartPalet
             : palette.traces[others++ % palette.traces.length];
     return {
       colour,
-      widthPx: role === 'build' ? 1.8 : role === 'reference' ? 1 : 1.3,
+      widthPx: role === 'build' ? 1.6 : 1,
       dash: DASHES[detector] === 'solid' ? 'solid' : [...DASHES[detector]],
       symbol: SYMBOLS[line] ?? 'circle',
     };
