@@ -1,4 +1,5 @@
 import {
+  afterNextRender,
   ChangeDetectionStrategy,
   Component,
   computed,
@@ -53,7 +54,7 @@ export class ChartHost {
   /** One sentence that says what the chart shows; read out before the table. */
   readonly ariaLabel = input.required<string>();
   readonly height = input(360);
-  readonly margins = input<PlotMargins>({ left: 52, right: 16, top: 16, bottom: 40 });
+  readonly margins = input.required<PlotMargins>();
   readonly table = input.required<ChartTable>();
   /** File name of downloads without its ending. */
   readonly fileName = input('chart');
@@ -86,13 +87,11 @@ export class ChartHost {
   constructor() {
     void inject(CHART_ENGINE)().then(() => this.isLoaded.set(true));
     const observer = new ResizeObserver(() => this.measure());
-    const destroy = inject(DestroyRef);
-    destroy.onDestroy(() => observer.disconnect());
-    queueMicrotask(() => {
-      if (destroy.destroyed) return;
+    afterNextRender(() => {
       observer.observe(this.frame().nativeElement);
       this.measure();
     });
+    inject(DestroyRef).onDestroy(() => observer.disconnect());
   }
 
   protected keepChart(chart: ECharts): void {
