@@ -62,6 +62,8 @@ export function importSweep(context: Context, actor: Actor, upload: SweepUpload)
   const measured = measureSweep(bytes, tags, found);
   context.originals.keep(bytes, originalSha256);
   return withTransaction(db, () => {
+    // Costs a look, unless the file was swept away as nobody's since the line above.
+    context.originals.keep(bytes, originalSha256);
     // The other process may have stored the very same sweep since the look above.
     const meanwhile = findSweepByIdentity(db, found.product.id, identity);
     if (meanwhile !== undefined) return { duplicate: true, sweepId: meanwhile };

@@ -1,6 +1,16 @@
 import { createHash, randomUUID } from 'node:crypto';
-import { existsSync, mkdirSync, readFileSync, renameSync, writeFileSync } from 'node:fs';
-import { dirname, join } from 'node:path';
+import {
+  existsSync,
+  mkdirSync,
+  readdirSync,
+  readFileSync,
+  renameSync,
+  rmSync,
+  statSync,
+  utimesSync,
+  writeFileSync,
+} from 'node:fs';
+import { basename, dirname, join } from 'node:path';
 import { gunzipSync, gzipSync } from 'node:zlib';
 
 /** SHA-256 of bytes, hexadecimal. */
@@ -10,8 +20,8 @@ export function sha256(bytes: Uint8Array): string {
 
 /**
  * The instrument files as they came, byte for byte, named by their SHA-256 and gzipped on disk.
- * A file is complete or absent: it is written beside its place and renamed. Files that no sweep names are harmless
- * and swept away by the prune job.
+ * A file is complete or absent: it is written beside its place and renamed. Files that nothing names, left by an import
+ * that failed, are harmless and swept away at night (prune-originals.ts).
  */
 export class OriginalFiles {
   /** Folders that are known to be there. */
@@ -22,7 +32,12 @@ export class OriginalFiles {
   /** Keeps the bytes; the same bytes twice are one file. Returns their SHA-256. */
   keep(bytes: Uint8Array, hash = sha256(bytes)): string {
     const path = this.pathOf(hash);
-    if (existsSync(path)) return hash;
+    if (existsSync(path)) {
+      // As good as new: whoever sweeps away old files leaves it alone.
+      const now = new Date();
+      utimesSync(path, now, now);
+      return hash;
+    }
     this.makeFolder(dirname(path));
     const beside = `${path}.${randomUUID()}.part`;
     // Level 1: three quarters of the best saving at a third of its time.
@@ -38,6 +53,22 @@ export class OriginalFiles {
     const bytes = gunzipSync(readFileSync(this.pathOf(hash)));
     if (sha256(bytes) !== hash) throw new Error(`the original ${hash} has changed on disk`);
     return bytes;
+  }
+
+  remove(hash: string): void {
+    rmSync(this.pathOf(hash), { force: true });
+  }
+
+  /** SHA-256 of every file that was last kept before the moment; broken-off writes from before it are removed on the way. */
+  *keptBefore(at: number): Generator<string> {
+    if (!existsSync(this.folder)) return;
+    for (const name of readdirSync(this.folder, { recursive: true, encoding: 'utf8' })) {
+      const path = join(this.folder, name);
+      const file = statSync(path, { throwIfNoEntry: false });
+      if (file === undefined || !file.isFile() || file.mtimeMs >= at) continue;
+      if (path.endsWith('.gz')) yield basename(path, '.gz');
+      else rmSync(path, { force: true });
+    }
   }
 
   private makeFolder(folder: string): void {
