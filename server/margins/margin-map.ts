@@ -53,7 +53,7 @@ function isChosen(series: CellSeriesRow, { stateId, line, detector }: SeriesChoi
   return (
     (stateId === undefined || series.stateId === stateId) &&
     (line === undefined || series.line === line) &&
-    (detector === undefined || series.detector === detector)
+    (detector === undefined ? !series.isSuperseded : series.detector === detector)
   );
 }
 

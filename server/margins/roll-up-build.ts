@@ -2,7 +2,14 @@ import { CELL_COUNT, CELL_NOT_MEASURED } from '@shared/limits/cells';
 import type { Context } from '../context';
 import { withTransaction } from '../db/with-transaction';
 import type { CellSeries } from '../db/schema/build-cells';
-import { deleteBuildCells, listRolledSweeps, type RolledSweep, updateRollUp, upsertBuildCells } from './roll-up-store';
+import {
+  deleteBuildCells,
+  listRolledSweeps,
+  type RolledSweep,
+  updateRollUp,
+  updateSuperseded,
+  upsertBuildCells,
+} from './roll-up-store';
 
 /**
  * Rewrites what is kept of a build's product sweeps: their number, the worst point and the margin map's row, and raises
@@ -10,8 +17,8 @@ import { deleteBuildCells, listRolledSweeps, type RolledSweep, updateRollUp, ups
  */
 export function rollUpBuild(context: Context, buildId: number): void {
   withTransaction(context.db, () => {
-    const sweeps = listRolledSweeps(context.db, buildId);
-    const worst = worstOf(sweeps);
+    const sweeps = markSuperseded(context, listRolledSweeps(context.db, buildId));
+    const worst = worstOf(sweeps.filter(({ isSuperseded }) => !isSuperseded));
     updateRollUp(context.db, buildId, {
       sweepCount: sweeps.length,
       worstMarginDb: worst?.worstMarginDb ?? null,
@@ -21,6 +28,23 @@ export function rollUpBuild(context: Context, buildId: number): void {
     if (sweeps.length === 0) deleteBuildCells(context.db, buildId);
     else upsertBuildCells(context.db, { buildId, ...rollUpCells(sweeps) });
   });
+}
+
+/**
+ * Marks the PK sweeps that a QP sweep of the same state and line over the same range decides instead of. A PK reading is
+ * held against the QP line because it can only overstate (common practice, no source).
+ */
+function markSuperseded(context: Context, sweeps: readonly RolledSweep[]): RolledSweep[] {
+  return sweeps.map((sweep) => {
+    const isSuperseded = sweep.detector === 'PK' && sweeps.some((other) => decidesInstead(other, sweep));
+    if (isSuperseded !== sweep.isSuperseded) updateSuperseded(context.db, sweep.id, isSuperseded);
+    return { ...sweep, isSuperseded };
+  });
+}
+
+function decidesInstead(other: RolledSweep, peak: RolledSweep): boolean {
+  const isSamePlace = other.stateId === peak.stateId && other.line === peak.line;
+  return other.detector === 'QP' && isSamePlace && other.startHz <= peak.startHz && other.stopHz >= peak.stopHz;
 }
 
 /** The sweep with the least margin; of equal ones the first. */
@@ -33,19 +57,21 @@ function worstOf(sweeps: readonly RolledSweep[]): RolledSweep | undefined {
   return worst;
 }
 
-/** Least margin of every cell: over all sweeps, and over those of each series, which the sweeps come ordered by. */
+/** Least margin of every cell: over the sweeps that count, and over those of each series, which the sweeps come ordered by. */
 function rollUpCells(sweeps: readonly RolledSweep[]): { series: CellSeries[]; cells: Buffer; tile: Buffer } {
   const series: CellSeries[] = [];
   const rows: Int16Array[] = [];
   const cells = emptyCells();
-  for (const { stateId, line, detector, cells: sweepCells } of sweeps) {
+  for (const { stateId, line, detector, isSuperseded, cells: sweepCells } of sweeps) {
     const last = series.at(-1);
     if (last === undefined || last.stateId !== stateId || last.line !== line || last.detector !== detector) {
-      series.push({ stateId, line, detector });
+      series.push({ stateId, line, detector, isSuperseded });
       rows.push(emptyCells());
     }
-    lower(rows[rows.length - 1] ?? cells, sweepCells);
-    lower(cells, sweepCells);
+    const own = series[series.length - 1];
+    own.isSuperseded &&= isSuperseded;
+    lower(rows[rows.length - 1], sweepCells);
+    if (!isSuperseded) lower(cells, sweepCells);
   }
   return { series, cells: asBuffer(cells), tile: Buffer.concat(rows.map(asBuffer)) };
 }

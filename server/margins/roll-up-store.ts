@@ -1,13 +1,16 @@
 import { and, asc, eq, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
 import { prepared } from '../db/prepared';
-import { buildCells, builds, sweeps } from '../db/schema';
+import { buildCells, builds, frequencyGrids, sweeps } from '../db/schema';
 
 export interface RolledSweep {
   id: number;
   stateId: number;
   line: string;
   detector: string;
+  startHz: number;
+  stopHz: number;
+  isSuperseded: boolean;
   worstMarginDb: number | null;
   worstFrequencyHz: number | null;
   cells: Buffer;
@@ -25,11 +28,15 @@ const sweepsOfBuild = prepared((db) =>
       stateId: sweeps.stateId,
       line: sweeps.line,
       detector: sweeps.detector,
+      startHz: frequencyGrids.startHz,
+      stopHz: frequencyGrids.stopHz,
+      isSuperseded: sweeps.isSuperseded,
       worstMarginDb: sweeps.worstMarginDb,
       worstFrequencyHz: sweeps.worstFrequencyHz,
       cells: sweeps.cells,
     })
     .from(sweeps)
+    .innerJoin(frequencyGrids, eq(frequencyGrids.id, sweeps.gridId))
     .where(and(eq(sweeps.buildId, sql.placeholder('buildId')), eq(sweeps.kind, 'product')))
     .orderBy(asc(sweeps.stateId), asc(sweeps.line), asc(sweeps.detector), asc(sweeps.id))
     .prepare(),
@@ -38,6 +45,11 @@ const sweepsOfBuild = prepared((db) =>
 /** Product sweeps of a build, those of one series together. */
 export function listRolledSweeps(db: Database, buildId: number): RolledSweep[] {
   return sweepsOfBuild(db).all({ buildId });
+}
+
+/** Notes whether a sweep is superseded. */
+export function updateSuperseded(db: Database, sweepId: number, isSuperseded: boolean): void {
+  db.update(sweeps).set({ isSuperseded }).where(eq(sweeps.id, sweepId)).run();
 }
 
 const rollUpUpdate = prepared((db) =>

@@ -3,7 +3,10 @@ import type { Detector, Line } from '@shared/detectors/detectors';
 import type { Database } from '../db/open-database';
 import { sweeps } from '../db/schema';
 
-/** Filter of one product's series; what is left out is not filtered. */
+/**
+ * Filter of one product's series; what is left out is not filtered. Without a detector, PK sweeps that a QP sweep
+ * supersedes do not count.
+ */
 export interface SeriesChoice {
   stateId?: number;
   line?: Line;
@@ -59,6 +62,6 @@ function chosen(productId: number, { stateId, line, detector }: SeriesChoice): S
     eq(sweeps.kind, 'product'),
     stateId === undefined ? undefined : eq(sweeps.stateId, stateId),
     line === undefined ? undefined : eq(sweeps.line, line),
-    detector === undefined ? undefined : eq(sweeps.detector, detector),
+    detector === undefined ? eq(sweeps.isSuperseded, false) : eq(sweeps.detector, detector),
   );
 }

@@ -5,7 +5,8 @@ import type { Database } from '../db/open-database';
 import { builds, importItems, sweeps, sweepTraces } from '../db/schema';
 
 export type Sweep = typeof sweeps.$inferSelect;
-export type NewSweep = Omit<Sweep, 'id'>;
+/** Whether it is superseded is the roll-up's to say (server/margins/roll-up-build.ts). */
+export type NewSweep = Omit<Sweep, 'id' | 'isSuperseded'>;
 
 const byIdentity = prepared((db) =>
   db
@@ -44,7 +45,7 @@ const insertion = prepared((db) => {
 });
 
 export function insertSweep(db: Database, sweep: NewSweep): number {
-  return Number(insertion(db).run({ ...sweep }).lastInsertRowid);
+  return Number(insertion(db).run({ ...sweep, isSuperseded: false }).lastInsertRowid);
 }
 
 /** Removes a sweep with its trace; batch items that brought it keep their record without it. */

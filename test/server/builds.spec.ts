@@ -127,6 +127,19 @@ describe('trend and margin map', () => {
     expect(points[2]?.worstFrequencyHz).toBeCloseTo(501_000, -3);
   });
 
+  it('count a PK reading only where no QP reading of the same line decides', async () => {
+    sweep('1.3', '04', { line: 'L', detector: 'PK' }, 60);
+    const worst = async (query = '') =>
+      ((await technician.get(`/api/v1/products/psu-240/trend?${query}`).expect(200)).body as TrendView).points.at(-1);
+    expect((await worst())?.worstMarginDb).toBeCloseTo(-4, 3);
+    sweep('1.3', '04', { line: 'L', detector: 'QP' }, 51);
+    expect((await worst())?.worstMarginDb).toBeCloseTo(5, 3);
+    expect((await worst('detector=PK'))?.worstMarginDb).toBeCloseTo(-4, 3);
+    expect((await list()).at(-1)).toMatchObject({ isOverLimit: false, sweepCount: 2 });
+    const map = (await technician.get('/api/v1/products/psu-240/margin-map').expect(200)).body as MarginMapView;
+    expect(Math.min(...(map.cells.at(-1) ?? []).map((cell) => cell ?? Infinity))).toBeCloseTo(5, 1);
+  });
+
   it('can be asked for one line, state, detector and band, and refuse what the product does not have', async () => {
     const trend = async (query: string): Promise<TrendView> =>
       (await technician.get(`/api/v1/products/psu-240/trend?${query}`).expect(200)).body;

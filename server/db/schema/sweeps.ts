@@ -72,6 +72,8 @@ export const sweeps = sqliteTable(
     worstFrequencyHz: real('worst_frequency_hz'),
     worstLevelDbuv: real('worst_level_dbuv'),
     worstLimitDbuv: real('worst_limit_dbuv'),
+    /** A PK sweep whose state and line were measured with QP over the same range: the QP reading decides. */
+    isSuperseded: integer('is_superseded', { mode: 'boolean' }).notNull().default(false),
     bands: text('bands', { mode: 'json' }).$type<BandMargin[]>().notNull(),
     /** Int16 little-endian, hundredths of a dB, one a cell of `shared/limits/cells.ts`. */
     cells: bytes('cells').notNull(),
@@ -90,6 +92,7 @@ export const sweeps = sqliteTable(
       table.productId,
       table.kind,
       table.buildId,
+      table.isSuperseded,
       table.stateId,
       table.line,
       table.detector,
