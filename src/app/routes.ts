@@ -1,10 +1,11 @@
 import { Routes } from '@angular/router';
 import { administratorsOnly, membersOnly, signedInOnly } from './session/session-guards';
+import { sessionRoutes } from './session/session-routes';
 import { toLastTeam } from './session/to-last-team';
 
 /** Every feature is one lazy folder; the shell frames all pages that need a sign-in and answers every unknown address. */
 export const routes: Routes = [
-  { path: '', loadChildren: () => import('./session/session-routes').then((m) => m.sessionRoutes) },
+  ...sessionRoutes,
   {
     path: 'mailbox',
     title: 'Mailbox',
