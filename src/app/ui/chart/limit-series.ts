@@ -1,7 +1,7 @@
 import { limitAt, type LimitLine } from '@shared/limits/limit-line';
 import { CHART_FONT, textWidthPx } from './axis-look';
 import { fractionAt, frequencyAt } from './frequency-scale';
-import type { SpectrumScene } from './spectrum-option';
+import type { SpectrumScene } from './spectrum-scene';
 import type { SpectrumLimit } from './spectrum-types';
 
 /** A limit line, heavy and neutral, with its name written on it. */

@@ -5,7 +5,8 @@ import './echarts';
 import type { ChartPalette } from './chart-palette';
 import { FULL_RANGE_HZ } from './frequency-scale';
 import { levelRange } from './level-range';
-import { spectrumOption, SpectrumScene } from './spectrum-option';
+import { spectrumOption } from './spectrum-option';
+import type { SpectrumScene } from './spectrum-scene';
 import type { SpectrumTrace } from './spectrum-types';
 import { traceLooks } from './trace-look';
 

@@ -1,29 +1,15 @@
 import { decimate } from '@shared/traces/decimate';
 import type { EChartsCoreOption } from 'echarts/core';
 import { axisLook, frequencyAxis } from './axis-look';
-import type { ChartPalette } from './chart-palette';
-import type { FrequencyRange } from './frequency-scale';
 import { limitSeries } from './limit-series';
 import type { PlotMargins } from './plot-margins';
 import { peakMarkers } from './peak-markers';
+import type { SpectrumScene } from './spectrum-scene';
 import { spectrumVerticals } from './spectrum-verticals';
-import type { SpectrumLimit, SpectrumMark, SpectrumTrace } from './spectrum-types';
+import type { SpectrumTrace } from './spectrum-types';
 import type { TraceLook } from './trace-look';
 
 export const SPECTRUM_MARGINS: PlotMargins = { left: 56, right: 16, top: 38, bottom: 44 };
-
-export interface SpectrumScene {
-  traces: readonly SpectrumTrace[];
-  looks: readonly TraceLook[];
-  limits: readonly SpectrumLimit[];
-  marks: readonly SpectrumMark[];
-  pinsHz: readonly number[];
-  range: FrequencyRange;
-  levels: { fromDbuv: number; toDbuv: number };
-  /** Width of the plot, px; each trace keeps its highest and lowest point of every column. */
-  columns: number;
-  palette: ChartPalette;
-}
 
 /** The drawing library's description of a spectrum: background, traces, limit lines with their names, pins. */
 export function spectrumOption(scene: SpectrumScene): EChartsCoreOption {

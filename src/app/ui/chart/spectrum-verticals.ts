@@ -1,6 +1,6 @@
 import { CHART_FONT, textWidthPx } from './axis-look';
 import { fractionAt, frequencyTicksHz } from './frequency-scale';
-import type { SpectrumScene } from './spectrum-option';
+import type { SpectrumScene } from './spectrum-scene';
 
 const LABEL = { show: true, position: 'end', fontSize: 12, fontFamily: CHART_FONT } as const;
 
