@@ -8,9 +8,9 @@ import type { Context } from '../context';
 import { withTransaction } from '../db/with-transaction';
 import { settleDrops } from '../drops/settle-drops';
 import { type BuildRecord, readBuildRecord } from './build-record';
+import { buildVerdict } from './build-verdict';
 import { dropCases } from './drop-cases';
 import { type GatheredSeries, gatherSeries } from './gather-series';
-import { gravestVerdict } from './gravest-verdict';
 import { guardSeries } from './guard-series';
 import { updateJudgedBuild } from './judged-build-store';
 import { markStale } from './mark-stale';
@@ -33,7 +33,7 @@ export function judgeOneBuild(context: Context, buildId: number): JudgedBuildOut
   const record = readBuildRecord(context, buildId);
   const { series, judgements } = judge(context, record);
   const cases = dropCases(context, record, series, judgements);
-  const verdict = gravestVerdict(judgements.map((judgement) => judgement.verdict));
+  const verdict = buildVerdict(judgements);
   return withTransaction(context.db, () => {
     const former = listVerdicts(context.db, buildId);
     const isChanged = storeVerdicts(context, buildId, former, judgements);

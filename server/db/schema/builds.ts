@@ -43,7 +43,7 @@ export const builds = sqliteTable(
     // Judgement: stale while dataVersion > judgedVersion.
     dataVersion: integer('data_version').notNull().default(0),
     judgedVersion: integer('judged_version').notNull().default(0),
-    /** Outcome over all bands and states: the gravest of them; null: not judged yet. */
+    /** Outcome over all bands and states, as `server/judging/build-verdict.ts` says; null: not judged yet. */
     verdict: text('verdict', { enum: VERDICTS }),
     judgedAt: moment('judged_at'),
   },
