@@ -1,7 +1,7 @@
 import type { Verdict } from '@shared/judging/verdict';
 import { axisLook, CHART_FONT } from './axis-look';
+import type { BuildRange } from './build-range';
 import type { ChartPalette } from './chart-palette';
-import type { PlotRange } from './plot-margins';
 import { verdictSymbol } from './verdict-symbols';
 
 /** A build on the axis that trend and margin map share, oldest first. */
@@ -13,12 +13,6 @@ export interface AxisBuild {
   builtAt: string;
   verdict: Verdict | null;
   isReference: boolean;
-}
-
-/** Builds in view by index; `to` is one past the last. Build i takes the stretch from i to i + 1. */
-export interface BuildRange {
-  from: number;
-  to: number;
 }
 
 /** Same margins above and below each other keep the builds of trend and map in line. */
@@ -78,14 +72,6 @@ export function buildStrip(builds: readonly AxisBuild[], { from, to }: BuildRang
     symbolSize: isCrowded ? 8 : 13,
     symbolOffset: [0, -13],
   };
-}
-
-/** The build range that a drag over a part of the plot asks for; at least two builds. */
-export function zoomedBuilds({ from, to }: BuildRange, { fromFraction, toFraction }: PlotRange): BuildRange {
-  const count = to - from;
-  const first = from + Math.floor(fromFraction * count);
-  const last = from + Math.ceil(toFraction * count);
-  return last - first >= 2 ? { from: first, to: last } : { from, to };
 }
 
 /** A vertical line over the reference build. */

@@ -1,4 +1,4 @@
-import type { BuildRange } from './build-axis';
+import type { BuildRange } from './build-range';
 
 /** Margins of a map as drawn: one column a build, or fewer when builds are narrower than a pixel. */
 export interface MarginGrid {

@@ -1,7 +1,8 @@
 import type { CustomSeriesRenderItemParams } from 'echarts/types/dist/shared';
 import type { EChartsCoreOption } from 'echarts/core';
 import { axisLook } from './axis-look';
-import { AxisBuild, BUILD_AXIS_MARGINS, buildAxis, BuildRange, buildStrip, STRIP_TOP_PX } from './build-axis';
+import { AxisBuild, BUILD_AXIS_MARGINS, buildAxis, buildStrip, STRIP_TOP_PX } from './build-axis';
+import type { BuildRange } from './build-range';
 import { cellTicks } from './cell-scale';
 import type { ChartPalette } from './chart-palette';
 import type { PlotMargins } from './plot-margins';

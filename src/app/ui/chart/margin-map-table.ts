@@ -1,5 +1,6 @@
 import { formatDecibels } from '@shared/units/format-decibels';
-import { AxisBuild, buildLabel, BuildRange } from './build-axis';
+import { AxisBuild, buildLabel } from './build-axis';
+import type { BuildRange } from './build-range';
 import type { ChartTable } from './chart-table';
 import { rangeText } from './frequency-scale';
 import { CHIP_LOOKS } from '../chip-looks';

@@ -1,7 +1,8 @@
 import { ChangeDetectionStrategy, Component, computed, input, linkedSignal, output, signal } from '@angular/core';
 import { formatDecibels } from '@shared/units/format-decibels';
 import { CHIP_LOOKS } from '../chip-looks';
-import { AxisBuild, buildLabel, BuildRange, zoomedBuilds } from './build-axis';
+import { AxisBuild, buildLabel } from './build-axis';
+import { BuildRange, isSameRange, rangeWithin, zoomedBuilds } from './build-range';
 import { ChartHost } from './chart-host';
 import { chartPalette } from './chart-palette';
 import type { Readout } from './chart-readout';
@@ -62,7 +63,7 @@ export class MarginMap {
   private readonly palette = chartPalette();
   private readonly plotPx = signal(1200);
   private readonly whole = computed((): BuildRange => ({ from: 0, to: this.builds().length }));
-  protected readonly range = linkedSignal<BuildRange>(() => clip(this.initialRange(), this.whole()));
+  protected readonly range = linkedSignal(() => rangeWithin(this.initialRange(), this.whole()), { equal: isSameRange });
   protected readonly cursor = linkedSignal<BuildRange, Cursor | null>({ source: this.range, computation: () => null });
   protected readonly margins = MARGIN_MAP_MARGINS;
 
@@ -217,11 +218,4 @@ export class MarginMap {
   private cellCount(): number {
     return this.edgesHz().length - 1;
   }
-}
-
-function clip(range: BuildRange | undefined, whole: BuildRange): BuildRange {
-  if (!range) return whole;
-  const from = Math.max(whole.from, range.from);
-  const to = Math.min(whole.to, range.to);
-  return to - from >= 2 ? { from, to } : whole;
 }

@@ -47,7 +47,12 @@ export class SpectrumChart {
   private readonly palette = chartPalette();
   private readonly columns = signal(1200);
   protected readonly hidden = signal<ReadonlySet<string>>(new Set());
-  protected readonly view = linkedSignal<SpectrumView>(() => ({ ...FULL_RANGE_HZ, pinsHz: [], ...this.initialView() }));
+  protected readonly view = linkedSignal<SpectrumView>(
+    () => ({ ...FULL_RANGE_HZ, pinsHz: [], ...this.initialView() }),
+    {
+      equal: isSameView,
+    },
+  );
   private readonly cursorHz = linkedSignal<FrequencyRange, number | null>({
     source: this.view,
     computation: () => null,
@@ -224,4 +229,9 @@ export class SpectrumChart {
       .map(({ label }) => label)
       .join(', ');
   }
+}
+
+/** An address that repeats the present view redraws nothing. */
+function isSameView(a: SpectrumView, b: SpectrumView): boolean {
+  return a.fromHz === b.fromHz && a.toHz === b.toHz && a.pinsHz.join() === b.pinsHz.join();
 }

@@ -13,7 +13,8 @@ import { formatFrequency } from '@shared/units/format-frequency';
 import { CHIP_LOOKS } from '../chip-looks';
 import { formatTime } from '../format-time';
 import { TEAM_TIME_ZONE } from '../team-time-zone';
-import { buildLabel, BuildRange, zoomedBuilds } from './build-axis';
+import { buildLabel } from './build-axis';
+import { BuildRange, isSameRange, rangeWithin, zoomedBuilds } from './build-range';
 import { ChartHost } from './chart-host';
 import { chartPalette } from './chart-palette';
 import type { Readout } from './chart-readout';
@@ -55,7 +56,7 @@ export class TrendChart {
   private readonly palette = chartPalette();
   private readonly plotPx = signal(1200);
   private readonly whole = computed((): BuildRange => ({ from: 0, to: this.builds().length }));
-  protected readonly range = linkedSignal<BuildRange>(() => this.initialRange() ?? this.whole());
+  protected readonly range = linkedSignal(() => rangeWithin(this.initialRange(), this.whole()), { equal: isSameRange });
   private readonly cursor = linkedSignal<BuildRange, number | null>({ source: this.range, computation: () => null });
   protected readonly margins = TREND_MARGINS;
   protected readonly looks = computed(() => trendLooks(this.series(), this.palette()));

@@ -2,7 +2,8 @@ import { formatDecibels } from '@shared/units/format-decibels';
 import { formatFrequency } from '@shared/units/format-frequency';
 import { CHIP_LOOKS } from '../chip-looks';
 import { formatTime } from '../format-time';
-import { buildLabel, BuildRange } from './build-axis';
+import { buildLabel } from './build-axis';
+import type { BuildRange } from './build-range';
 import type { ChartTable } from './chart-table';
 import type { TrendBuild, TrendSeries } from './trend-types';
 
