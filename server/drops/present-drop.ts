@@ -1,4 +1,4 @@
-import type { DropSummary, DropView } from '@shared/contracts/drops';
+import type { DropSighting, DropSummary, DropView } from '@shared/contracts/drops';
 import { isoTime } from '../iso-time';
 import type { DropEvent, NamedDrop } from './drop-store';
 
@@ -23,9 +23,16 @@ export function presentDropSummary(named: NamedDrop): DropSummary {
     isOverLimit,
     witnesses: drop.evidence.witnesses.map(({ line, detector }) => ({ line, detector })),
     sentence,
+    latest: ownSighting(named),
+    noLongerSeenIn: null,
     createdAt: isoTime(drop.createdAt),
     updatedAt: isoTime(drop.updatedAt),
   };
+}
+
+function ownSighting({ drop, hardware, firmware }: NamedDrop): DropSighting {
+  const { buildId, differenceDb, marginDb, frequencyHz, isOverLimit } = drop;
+  return { buildId, hardware, firmware, differenceDb, marginDb, frequencyHz, isOverLimit };
 }
 
 /** What a drop's page shows beyond its row. */
@@ -40,6 +47,7 @@ export function presentDrop(named: NamedDrop, { events, ...details }: DropDetail
     ...presentDropSummary(named),
     ...details,
     evidence,
+    seenIn: [ownSighting(named)],
     buildSwitching: named.buildSwitching,
     remarks: [...new Map(remarks.map(({ code, text }) => [text, { code, text }])).values()],
     history: events.map(({ at, actorName, kind, text }) => ({ at: isoTime(at), actor: actorName, kind, text })),

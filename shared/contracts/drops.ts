@@ -55,6 +55,20 @@ export const DropQuery = z.object({
 });
 export type DropQuery = z.infer<typeof DropQuery>;
 
+/** A build that shows the loss, with what is left of the margin there. */
+export const DropSighting = z
+  .object({
+    buildId: z.int(),
+    hardware: z.string(),
+    firmware: z.string(),
+    differenceDb: z.number(),
+    marginDb: z.number(),
+    frequencyHz: z.number(),
+    isOverLimit: z.boolean(),
+  })
+  .meta({ id: 'DropSighting' });
+export type DropSighting = z.infer<typeof DropSighting>;
+
 /** Row of GET /api/v1/products/:key/drops?state and GET /api/teams/:team/drops?state&owner */
 export const DropSummary = z
   .object({
@@ -75,6 +89,10 @@ export const DropSummary = z
     isOverLimit: z.boolean(),
     witnesses: z.array(z.object({ line: z.string(), detector: z.string() })),
     sentence: z.string(),
+    /** Newest build that shows the loss: what is left now. The margin of the build that raised the drop stands beside it. */
+    latest: DropSighting,
+    /** First build after `latest` whose margin is back. */
+    noLongerSeenIn: z.object({ id: z.int(), hardware: z.string(), firmware: z.string() }).nullable(),
     createdAt: z.string(),
     updatedAt: z.string(),
   })
@@ -86,6 +104,8 @@ export const DropView = DropSummary.extend({
   evidence: z.custom<DropEvidence>().meta({ type: 'object', description: 'what it was judged on, frozen' }),
   buildSwitching: z.array(SwitchingStage),
   remarks: z.array(Remark),
+  /** Every build that shows the loss, the drop's own among them, oldest first. */
+  seenIn: z.array(DropSighting),
   fixedBy: z.object({ id: z.int(), hardware: z.string(), firmware: z.string() }).nullable(),
   history: z.array(z.object({ at: z.string(), actor: z.string(), kind: z.enum(DROP_EVENT_KINDS), text: z.string() })),
   /** States this caller may move the drop to. */
