@@ -1,3 +1,10 @@
 import { Routes } from '@angular/router';
 
-export const limitsRoutes: Routes = [];
+export const limitsRoutes: Routes = [
+  {
+    path: '',
+    pathMatch: 'full',
+    title: 'Limits',
+    loadComponent: () => import('./limits-page').then((m) => m.LimitsPage),
+  },
+];

@@ -1,0 +1,90 @@
+import { ChangeDetectionStrategy, Component, computed, inject, input, output } from '@angular/core';
+import type { BatchTags } from '@shared/contracts/imports';
+import { SWEEP_KINDS } from '@shared/detectors/detectors';
+import { CurrentTeam } from '../session/current-team';
+import type { DraftFile, FileChoice } from './draft-file';
+import { KIND_WORDS } from './kind-words';
+import { momentOf, wallTimeOf } from './zoned-time';
+
+/** What is different about one file: state, time, run and role, over the common tags. */
+@Component({
+  selector: 'app-file-choices',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `
+    @let choice = file().choice;
+    <label>
+      State
+      <input
+        #state
+        type="text"
+        [attr.list]="listId()"
+        [value]="choice.state ?? ''"
+        [placeholder]="common().state ?? 'needed'"
+        [class.needed]="!choice.state && !common().state"
+        (change)="chosen.emit({ state: words(state.value) })"
+      />
+      <datalist [id]="listId()">
+        @for (one of states(); track one) {
+          <option [value]="one"></option>
+        }
+      </datalist>
+    </label>
+    <label>
+      Taken at
+      <input
+        #takenAt
+        type="datetime-local"
+        [value]="wallTime()"
+        (change)="chosen.emit({ takenAt: moment(takenAt.value) })"
+      />
+    </label>
+    <label>
+      Run
+      <input
+        #run
+        type="text"
+        [value]="choice.run ?? ''"
+        [placeholder]="common().run ?? 'day and bench'"
+        (change)="chosen.emit({ run: words(run.value) })"
+      />
+    </label>
+    <label>
+      Role
+      <select #kind (change)="chooseKind(kind.value)">
+        <option value="" [selected]="!choice.kind">as all: {{ kindWords[common().kind ?? 'product'] }}</option>
+        @for (one of kinds; track one) {
+          <option [value]="one" [selected]="one === choice.kind">{{ kindWords[one] }}</option>
+        }
+      </select>
+    </label>
+  `,
+  styleUrl: './file-choices.scss',
+})
+export class FileChoices {
+  private readonly team = inject(CurrentTeam);
+
+  readonly file = input.required<DraftFile>();
+  readonly common = input.required<BatchTags>();
+  readonly states = input.required<readonly string[]>();
+  readonly chosen = output<Partial<FileChoice>>();
+
+  protected readonly kinds = SWEEP_KINDS;
+  protected readonly kindWords = KIND_WORDS;
+  protected readonly listId = computed(() => `states-of-file-${this.file().id}`);
+  protected readonly wallTime = computed(() => {
+    const at = this.file().choice.takenAt ?? this.common().takenAt;
+    return at === undefined ? '' : wallTimeOf(at, this.team.timeZone());
+  });
+
+  protected words(text: string): string | undefined {
+    return text.trim() || undefined;
+  }
+
+  protected moment(wallTime: string): string | undefined {
+    return momentOf(wallTime, this.team.timeZone());
+  }
+
+  protected chooseKind(text: string): void {
+    this.chosen.emit({ kind: SWEEP_KINDS.find((kind) => kind === text) });
+  }
+}

@@ -1,0 +1,78 @@
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { MatIcon } from '@angular/material/icon';
+import type { ReadingView } from '@shared/contracts/imports';
+import { formatFrequency } from '@shared/units/format-frequency';
+
+const DELIMITER_WORDS: Record<string, string> = { ',': 'comma', ';': 'semicolon', '\t': 'tab' };
+
+/** What was recognised in a file, what was concluded and why, and what is odd about it. */
+@Component({
+  selector: 'app-reading-facts',
+  imports: [MatIcon],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `
+    <dl>
+      @for (fact of facts(); track fact.name) {
+        <div>
+          <dt>{{ fact.name }}</dt>
+          <dd class="number">{{ fact.text }}</dd>
+        </div>
+      }
+    </dl>
+    @for (one of reading().inferred; track one.what) {
+      <p>
+        <mat-icon class="inline-icon" svgIcon="info" /><strong>{{ one.what }} {{ one.value }}</strong
+        >: {{ one.why }}
+      </p>
+    }
+    @for (remark of reading().remarks; track remark.code) {
+      <p><mat-icon class="inline-icon" svgIcon="note" />{{ remark.text }}</p>
+    }
+  `,
+  styles: `
+    :host {
+      display: grid;
+      gap: 6px;
+      font-size: 13px;
+    }
+    dl {
+      display: flex;
+      flex-wrap: wrap;
+      gap: 4px 24px;
+      margin: 0;
+    }
+    dt {
+      color: var(--sl-ink-muted);
+      font-size: 12px;
+      line-height: 16px;
+    }
+    dd {
+      margin: 0;
+    }
+    mat-icon {
+      margin-inline-end: 4px;
+      color: var(--sl-ink-muted);
+    }
+  `,
+})
+export class ReadingFacts {
+  readonly reading = input.required<ReadingView>();
+
+  protected readonly facts = computed(() => {
+    const { pointCount, startHz, stopHz, medianStepHz, frequencyUnit, traces, ...file } = this.reading();
+    const marks = file.decimalMark === ',' ? 'decimal comma' : 'decimal point';
+    return [
+      { name: 'Points', text: pointCount.toLocaleString('en') },
+      { name: 'Range', text: `${formatFrequency(startHz)} to ${formatFrequency(stopHz)}` },
+      { name: 'Step', text: formatFrequency(medianStepHz) },
+      { name: 'Units', text: `${frequencyUnit}, ${levelUnits(traces)}` },
+      { name: 'RBW', text: file.rbwHz === null ? 'not stated' : formatFrequency(file.rbwHz) },
+      { name: 'Attenuation', text: file.attenuationDb === null ? 'not stated' : `${file.attenuationDb} dB` },
+      { name: 'Written with', text: `${DELIMITER_WORDS[file.delimiter] ?? file.delimiter}, ${marks}` },
+    ];
+  });
+}
+
+function levelUnits(traces: ReadingView['traces']): string {
+  return [...new Set(traces.map(({ levelUnit }) => levelUnit.replace('u', 'µ')))].join(', ');
+}

@@ -1,0 +1,51 @@
+import type { Problem } from '@shared/contracts/problem';
+import { adviceOn } from '../ui/problem';
+
+export interface ReadingFault {
+  /** "Line 214, column 2"; empty when the fault is not in one place. */
+  readonly place: string;
+  /** Line of the file, from 1, to show it. */
+  readonly line: number | null;
+  readonly found: string;
+  readonly expected: string;
+  /** What happened, where it is not said by place, found and expected. */
+  readonly happened: string;
+  readonly advice: string;
+}
+
+/** A problem of a file in the parts that a person looks for: where, what was found, what was expected, what to do. */
+export function readingFault(problem: Problem): ReadingFault {
+  const { line, column, found = '', expected = '' } = problem;
+  const places = [line && `line ${line}`, column && `column ${column}`].filter(Boolean).join(', ');
+  const isPlaced = problem.type === '/problems/unreadable' && found !== '';
+  return {
+    place: places.charAt(0).toUpperCase() + places.slice(1),
+    line: line ?? null,
+    found,
+    expected,
+    happened: isPlaced ? '' : problem.detail,
+    advice: adviceOn(problem),
+  };
+}
+
+/** Whether the way out is to say which unit a file is written in: only its texts tell, the code is the same for every fault. */
+export function asksForUnits({ detail, advice = '' }: Problem): boolean {
+  return /\bunit\b/i.test(`${detail} ${advice}`);
+}
+
+export interface ExcerptLine {
+  readonly number: number;
+  readonly text: string;
+}
+
+const LINES_AROUND = 2;
+const LONGEST_LINE = 160;
+
+/** The lines of a file around one of them. */
+export function excerptAround(text: string, line: number): ExcerptLine[] {
+  const first = Math.max(1, line - LINES_AROUND);
+  return text
+    .split(/\r\n|\n|\r/)
+    .slice(first - 1, line + LINES_AROUND)
+    .map((content, place) => ({ number: first + place, text: content.slice(0, LONGEST_LINE) }));
+}

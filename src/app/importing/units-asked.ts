@@ -1,0 +1,50 @@
+import { ChangeDetectionStrategy, Component, input, output } from '@angular/core';
+import { FREQUENCY_UNITS, FrequencyUnit } from '@shared/units/frequency-unit';
+import { LEVEL_UNITS, LevelUnit } from '@shared/units/level-unit';
+import type { Units } from './draft-file';
+
+/** The units that a file leaves out; choosing one reads the file again. */
+@Component({
+  selector: 'app-units-asked',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `
+    <label>
+      Frequencies in
+      <select (change)="chooseFrequency(frequency.value)" #frequency>
+        <option value="" [selected]="!units().frequencyUnit">as the file says</option>
+        @for (unit of frequencyUnits; track unit) {
+          <option [value]="unit" [selected]="unit === units().frequencyUnit">{{ unit }}</option>
+        }
+      </select>
+    </label>
+    <label>
+      Levels in
+      <select (change)="chooseLevel(level.value)" #level>
+        <option value="" [selected]="!units().levelUnit">as the file says</option>
+        @for (unit of levelUnits; track unit.key) {
+          <option [value]="unit.key" [selected]="unit.key === units().levelUnit">{{ unit.words }}</option>
+        }
+      </select>
+    </label>
+  `,
+  styleUrl: './units-asked.scss',
+})
+export class UnitsAsked {
+  readonly units = input.required<Units>();
+  readonly chosen = output<Units>();
+
+  protected readonly frequencyUnits = FREQUENCY_UNITS;
+  protected readonly levelUnits = LEVEL_UNITS.map((key) => ({ key, words: key.replace('u', 'µ') }));
+
+  protected chooseFrequency(unit: string): void {
+    const { levelUnit } = this.units();
+    const frequencyUnit = FREQUENCY_UNITS.find((one): one is FrequencyUnit => one === unit);
+    this.chosen.emit({ ...(frequencyUnit && { frequencyUnit }), ...(levelUnit && { levelUnit }) });
+  }
+
+  protected chooseLevel(unit: string): void {
+    const { frequencyUnit } = this.units();
+    const levelUnit = LEVEL_UNITS.find((one): one is LevelUnit => one === unit);
+    this.chosen.emit({ ...(frequencyUnit && { frequencyUnit }), ...(levelUnit && { levelUnit }) });
+  }
+}
