@@ -8,7 +8,7 @@ import { fractionAt, FrequencyRange, frequencyAt, FULL_RANGE_HZ, rangeText } fro
 import { levelRange } from './level-range';
 import { atFraction, PlotPoint, PlotRange } from './plot-margins';
 import { SpectrumLegend } from './spectrum-legend';
-import { SPECTRUM_MARGINS, spectrumOption } from './spectrum-option';
+import { spectrumMargins, spectrumOption } from './spectrum-option';
 import { SpectrumPins } from './spectrum-pins';
 import { readTrace, SpectrumReading } from './spectrum-reading';
 import { spectrumCsvRows, spectrumTable } from './spectrum-table';
@@ -59,7 +59,7 @@ export class SpectrumChart {
   });
   private readonly pointerY = signal(0.2);
 
-  protected readonly margins = SPECTRUM_MARGINS;
+  protected readonly margins = computed(() => spectrumMargins(this.marks().length > 0));
   protected readonly looks = computed(() => traceLooks(this.traces(), this.palette()));
   protected readonly shown = computed(() => this.traces().filter(({ id }) => !this.hidden().has(id)));
   private readonly levels = computed(() => levelRange(this.traces(), this.limits()));
@@ -96,7 +96,7 @@ export class SpectrumChart {
   protected readonly readout = computed((): Readout | null => {
     const cursorHz = this.cursorHz();
     if (cursorHz === null) return null;
-    const { left, right, top, bottom } = SPECTRUM_MARGINS;
+    const { left, right, top, bottom } = this.margins();
     const widthPx = this.columns() + left + right;
     return {
       xPx: atFraction(fractionAt(cursorHz, this.view()), widthPx, left, right),

@@ -9,7 +9,10 @@ import { spectrumVerticals } from './spectrum-verticals';
 import type { SpectrumTrace } from './spectrum-types';
 import type { TraceLook } from './trace-look';
 
-export const SPECTRUM_MARGINS: PlotMargins = { left: 56, right: 16, top: 38, bottom: 44 };
+/** Room above the plot for the numbers of pins and, where there are harmonics, for a row with their names. */
+export function spectrumMargins(hasMarks: boolean): PlotMargins {
+  return { left: 56, right: 16, top: hasMarks ? 38 : 22, bottom: 44 };
+}
 
 /** The drawing library's description of a spectrum: background, traces, limit lines with their names, pins. */
 export function spectrumOption(scene: SpectrumScene): EChartsCoreOption {
@@ -17,7 +20,7 @@ export function spectrumOption(scene: SpectrumScene): EChartsCoreOption {
   const look = axisLook(palette);
   return {
     animation: false,
-    grid: { ...SPECTRUM_MARGINS, containLabel: false },
+    grid: { ...spectrumMargins(scene.marks.length > 0), containLabel: false },
     xAxis: frequencyAxis(range, palette),
     yAxis: {
       ...look,

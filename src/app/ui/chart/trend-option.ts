@@ -49,7 +49,9 @@ export function trendOption(scene: TrendScene): EChartsCoreOption {
       type: 'value',
       min: margins.fromDb,
       max: margins.toDb,
-      axisLabel: { ...look.axisLabel, formatter: '{value} dB' },
+      interval: margins.toDb - margins.fromDb > 40 ? 10 : 5,
+      // The lower end need not be a whole step.
+      axisLabel: { ...look.axisLabel, showMinLabel: margins.fromDb % 5 === 0, formatter: '{value} dB' },
     },
     series: [
       { type: 'line', data: [], silent: true, z: 1, markArea: overArea(scene) },
