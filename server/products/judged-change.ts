@@ -7,20 +7,15 @@ export interface JudgedBand {
 }
 
 /**
- * The one change of margin that stands for a build: the largest loss among the bands that lost, else the largest gain
- * among those that gained, else the change of the band with the least margin. Null when nothing was compared.
+ * The one change of margin that stands for a build, in dB: that of the band with the least margin among those that lost;
+ * when none lost, among all. So it belongs to the verdict and the margin it stands beside. Null when nothing was compared.
  */
 export function judgedChange(bands: readonly JudgedBand[]): number | null {
-  const differences = (verdict: Verdict) =>
-    bands
-      .filter((band) => band.verdict === verdict)
-      .flatMap(({ differenceDb }) => (differenceDb === null ? [] : [differenceDb]));
-  const lost = differences('lost');
-  if (lost.length > 0) return Math.min(...lost);
-  const gained = differences('gained');
-  if (gained.length > 0) return Math.max(...gained);
-  const closest = bands
-    .filter((band) => band.differenceDb !== null && band.marginDb !== null)
-    .sort((one, other) => (one.marginDb ?? 0) - (other.marginDb ?? 0));
-  return closest[0]?.differenceDb ?? null;
+  const lost = bands.filter(({ verdict }) => verdict === 'lost');
+  let tightest: JudgedBand | undefined;
+  for (const band of lost.length > 0 ? lost : bands) {
+    if (band.differenceDb === null || band.marginDb === null) continue;
+    if (tightest === undefined || band.marginDb < (tightest.marginDb ?? Infinity)) tightest = band;
+  }
+  return tightest?.differenceDb ?? null;
 }

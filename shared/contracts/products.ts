@@ -44,7 +44,10 @@ export const ProductSummary = z
         worstMarginDb: z.number().nullable(),
         worstFrequencyHz: z.number().nullable(),
         verdict: VerdictName.nullable(),
-        changeDb: z.number().nullable().describe('largest judged change of margin against the reference, dB'),
+        changeDb: z
+          .number()
+          .nullable()
+          .describe('judged change of margin against the reference where it is tightest, dB'),
       })
       .nullable(),
     previousWorstMarginDb: z.number().nullable(),
