@@ -3,6 +3,7 @@ import express, { type Express } from 'express';
 import session from 'express-session';
 import helmet from 'helmet';
 import { existsSync } from 'node:fs';
+import type { ServerResponse } from 'node:http';
 import { resolve } from 'node:path';
 import passport from 'passport';
 import { pinoHttp } from 'pino-http';
@@ -122,7 +123,7 @@ function isText(contentType: unknown): boolean {
 function servePages(app: Express): void {
   const client = resolve('dist/client');
   const index = resolve(client, 'index.html');
-  app.use(express.static(client, { index: false, immutable: true, maxAge: '365d' }));
+  app.use(express.static(client, { index: false, cacheControl: false, setHeaders: keepHashedFiles }));
   app.get('/{*path}', (_request, response, next) => {
     if (!existsSync(index)) {
       next(new ServiceError('notFound', 'the pages are not built yet: run npm run build'));
@@ -130,4 +131,10 @@ function servePages(app: Express): void {
     }
     response.set('cache-control', 'no-cache').sendFile(index);
   });
+}
+
+/** A file with a hash in its name never changes; any other is asked for again. */
+function keepHashedFiles(response: ServerResponse, path: string): void {
+  const isHashed = /-[A-Z0-9]{8}\.[a-z0-9]+$/.test(path);
+  response.setHeader('cache-control', isHashed ? 'public, max-age=31536000, immutable' : 'no-cache');
 }
