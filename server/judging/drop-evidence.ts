@@ -35,7 +35,7 @@ export function dropEvidence(
   const referenceSweepIds = sortedIds(witnesses.flatMap((witness) => witness.referenceSweepIds));
   const harmonic = lead.worst && nameHarmonic(lead.worst.frequencyHz, build.switching, toleranceHz);
   return {
-    methodVersion: Number(METHOD_VERSION),
+    methodVersion: METHOD_VERSION,
     limitSetKey: product.limitSetKey,
     limitSetVersion: planSet(product.limitSetKey).version,
     thresholdDb,

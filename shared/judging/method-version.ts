@@ -1,2 +1,2 @@
 /** Goes into every stored judgement; rises whenever the same data could be judged differently. */
-export const METHOD_VERSION = '1';
+export const METHOD_VERSION = 1;
