@@ -110,6 +110,17 @@ CREATE TABLE `drop_events` (
 );
 --> statement-breakpoint
 CREATE INDEX `drop_events_drop` ON `drop_events` (`drop_id`,`at`);--> statement-breakpoint
+CREATE TABLE `drop_sightings` (
+	`id` integer PRIMARY KEY AUTOINCREMENT NOT NULL,
+	`drop_id` integer NOT NULL,
+	`build_id` integer NOT NULL,
+	`loss` text,
+	FOREIGN KEY (`drop_id`) REFERENCES `drops`(`id`) ON UPDATE no action ON DELETE no action,
+	FOREIGN KEY (`build_id`) REFERENCES `builds`(`id`) ON UPDATE no action ON DELETE no action
+);
+--> statement-breakpoint
+CREATE UNIQUE INDEX `drop_sightings_place` ON `drop_sightings` (`drop_id`,`build_id`);--> statement-breakpoint
+CREATE INDEX `drop_sightings_build` ON `drop_sightings` (`build_id`);--> statement-breakpoint
 CREATE TABLE `drops` (
 	`id` integer PRIMARY KEY AUTOINCREMENT NOT NULL,
 	`team_id` integer NOT NULL,
@@ -118,6 +129,7 @@ CREATE TABLE `drops` (
 	`state_id` integer NOT NULL,
 	`band` text NOT NULL,
 	`state` text NOT NULL,
+	`is_supported` integer DEFAULT true NOT NULL,
 	`owner_id` integer,
 	`difference_db` real NOT NULL,
 	`margin_db` real NOT NULL,

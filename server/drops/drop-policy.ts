@@ -1,5 +1,6 @@
 import { DROP_STATE_WORDS, type DropMove, type DropState, type DropWitness } from '@shared/contracts/drops';
-import type { BandJudgement, ReasonCode } from '@shared/judging/band-judgement';
+import type { BandJudgement } from '@shared/judging/band-judgement';
+import { USABLE_REASONS } from '@shared/judging/choose-reference';
 import { formatDecibels } from '@shared/units/format-decibels';
 
 type MoveTarget = DropMove['state'];
@@ -29,41 +30,53 @@ export function moveFault(from: DropState, { state: to, note, fixedByBuildId }: 
   return null;
 }
 
-/** A build named as the one that shows the fix. */
-export interface FixingBuild {
+/** A build that may have the margin back. */
+interface LaterBuild {
   readonly name: string;
-  readonly isNewer: boolean;
-  readonly isStale: boolean;
   readonly judgements: readonly BandJudgement[];
 }
 
-/** A margin that was measured soundly, though perhaps with too few runs for a verdict of its own. */
-const SOUND_REASONS: readonly ReasonCode[] = ['withinSpread', 'noReference'];
+/** A build named as the one that shows the fix. */
+export interface FixingBuild extends LaterBuild {
+  /** Newest build that shows the loss. */
+  readonly lastSeenIn: string;
+  readonly isNewer: boolean;
+  readonly isStale: boolean;
+}
+
+interface Place {
+  readonly stateId: number;
+  readonly band: string;
+}
 
 /**
- * Why a build does not show that a drop is fixed, in one line; null when it does.
- *
- * It must be newer, judged, measured in every series that lost, not lost there itself, and nearer to the margin before the
- * loss than to the margin with it: compared with builds that all have the loss, one that still has it would be "held".
+ * Why a build does not show that a drop is fixed, in one line; null when it does. It must be judged, newer than every build that
+ * shows the loss, and have the margin back.
  */
-export function fixFault(
-  place: { readonly stateId: number; readonly band: string },
-  witnesses: readonly DropWitness[],
-  fix: FixingBuild,
-): string | null {
-  if (!fix.isNewer) return `build ${fix.name} is not newer than the build of the drop`;
+export function fixFault(place: Place, witnesses: readonly DropWitness[], fix: FixingBuild): string | null {
+  if (!fix.isNewer) return `build ${fix.name} is not newer than ${fix.lastSeenIn}, which shows the loss`;
   if (fix.isStale) return `build ${fix.name} has sweeps that are not judged yet: judge it first`;
+  return lossFault(place, witnesses, fix);
+}
+
+/**
+ * Why a build does not show that a loss is gone, in one line; null when it does.
+ *
+ * It must be measured in every series that lost, not lost there itself, and nearer to the margin before the loss than to the
+ * margin with it: compared with builds that all have the loss, one that still has it would be "held".
+ */
+export function lossFault(place: Place, witnesses: readonly DropWitness[], later: LaterBuild): string | null {
   for (const witness of witnesses) {
-    const fault = seriesFault(place, witness, fix);
+    const fault = seriesFault(place, witness, later);
     if (fault !== null) return fault;
   }
   return null;
 }
 
 function seriesFault(
-  { stateId, band }: { readonly stateId: number; readonly band: string },
+  { stateId, band }: Place,
   { line, detector, judgement: lost }: DropWitness,
-  fix: FixingBuild,
+  fix: LaterBuild,
 ): string | null {
   const where = `${lost.stateName}, ${line} ${detector}, ${band}`;
   const now = fix.judgements.find(
@@ -71,7 +84,7 @@ function seriesFault(
   );
   if (now === undefined || now.meanMarginDb === null) return `build ${fix.name} was not measured in ${where}`;
   if (now.verdict === 'lost') return `build ${fix.name} is itself judged lost in ${where}`;
-  const stop = now.reasons.find(({ code }) => !SOUND_REASONS.includes(code));
+  const stop = now.reasons.find(({ code }) => !USABLE_REASONS.includes(code));
   if (stop !== undefined) return `build ${fix.name} cannot show it in ${where}: ${stop.text}`;
   const beforeDb = lost.referenceMeanMarginDb ?? Infinity;
   const withLossDb = lost.meanMarginDb ?? beforeDb;

@@ -1,5 +1,5 @@
-import { OPEN_DROP_STATES } from '@shared/contracts/drops';
-import { and, asc, count, desc, eq, inArray, type SQL, sql } from 'drizzle-orm';
+import { and, asc, eq, inArray, isNull, type SQL } from 'drizzle-orm';
+import { alias } from 'drizzle-orm/sqlite-core';
 import type { Database } from '../db/open-database';
 import {
   builds,
@@ -20,6 +20,15 @@ export type NewDropEvent = typeof dropEvents.$inferInsert;
 
 export function listDropsOfBuild(db: Database, buildId: number): DropRow[] {
   return db.select().from(drops).where(eq(drops.buildId, buildId)).orderBy(asc(drops.id)).all();
+}
+
+export function listDropsById(db: Database, ids: readonly number[]): DropRow[] {
+  return db
+    .select()
+    .from(drops)
+    .where(inArray(drops.id, [...ids]))
+    .orderBy(asc(drops.id))
+    .all();
 }
 
 export function findDrop(db: Database, id: number): DropRow | undefined {
@@ -43,42 +52,6 @@ export function listDropEvents(db: Database, dropId: number): DropEvent[] {
   return db.select().from(dropEvents).where(eq(dropEvents.dropId, dropId)).orderBy(asc(dropEvents.id)).all();
 }
 
-/** The latest event that says whether the data support the drop. */
-export function latestDataEvent(db: Database, dropId: number): DropEvent | undefined {
-  const aboutData = inArray(dropEvents.kind, ['raised', 'evidence', 'withdrawn']);
-  return db
-    .select()
-    .from(dropEvents)
-    .where(and(eq(dropEvents.dropId, dropId), aboutData))
-    .orderBy(desc(dropEvents.id))
-    .limit(1)
-    .get();
-}
-
-const isOpen = inArray(drops.state, [...OPEN_DROP_STATES]);
-
-/** Open drops by product; products without any are absent. */
-export function countOpenByProduct(db: Database, productIds: readonly number[]): Map<number, number> {
-  const rows = db
-    .select({ id: drops.productId, drops: count() })
-    .from(drops)
-    .where(and(inArray(drops.productId, [...productIds]), isOpen))
-    .groupBy(drops.productId)
-    .all();
-  return new Map(rows.map((row) => [row.id, row.drops]));
-}
-
-/** Open drops by build; builds without any are absent. */
-export function countOpenByBuild(db: Database, buildIds: readonly number[]): Map<number, number> {
-  const rows = db
-    .select({ id: drops.buildId, drops: count() })
-    .from(drops)
-    .where(and(inArray(drops.buildId, [...buildIds]), isOpen))
-    .groupBy(drops.buildId)
-    .all();
-  return new Map(rows.map((row) => [row.id, row.drops]));
-}
-
 /** Which drops to list. */
 export interface DropFilter {
   teamId?: number;
@@ -100,6 +73,7 @@ function selectNamed(db: Database) {
       team: teams.key,
       hardware: hardwareRevisions.name,
       firmware: firmwareRevisions.name,
+      buildPosition: builds.position,
       buildSwitching: builds.switching,
       operatingState: operatingStates.name,
       ownerName: people.name,
@@ -118,16 +92,36 @@ export function findNamedDrop(db: Database, id: number): NamedDrop | undefined {
   return selectNamed(db).where(eq(drops.id, id)).get();
 }
 
-/** Open ones first, then over the limit, then the least margin left, then the largest loss. */
+/** In the order they were raised in. */
 export function listNamedDrops(db: Database, { teamId, productId, states, ownerId }: DropFilter): NamedDrop[] {
   const conditions: (SQL | undefined)[] = [
     teamId === undefined ? undefined : eq(drops.teamId, teamId),
     productId === undefined ? undefined : eq(drops.productId, productId),
     states === undefined ? undefined : inArray(drops.state, [...states]),
-    ownerId === undefined ? undefined : ownerId === null ? sql`${drops.ownerId} is null` : eq(drops.ownerId, ownerId),
+    ownerId === undefined ? undefined : ownerId === null ? isNull(drops.ownerId) : eq(drops.ownerId, ownerId),
   ];
   return selectNamed(db)
     .where(and(...conditions))
-    .orderBy(desc(isOpen), desc(drops.isOverLimit), asc(drops.marginDb), asc(drops.differenceDb), asc(drops.id))
+    .orderBy(asc(drops.id))
+    .all();
+}
+
+/** A drop with the positions of its build and of the one that shows it fixed. */
+export interface PlacedDrop {
+  drop: DropRow;
+  position: number;
+  fixedPosition: number | null;
+}
+
+/** Drops of a product that the data support, in the order they were raised in. */
+export function listSupportedDrops(db: Database, productId: number): PlacedDrop[] {
+  const fixing = alias(builds, 'fixing');
+  return db
+    .select({ drop: drops, position: builds.position, fixedPosition: fixing.position })
+    .from(drops)
+    .innerJoin(builds, eq(builds.id, drops.buildId))
+    .leftJoin(fixing, eq(fixing.id, drops.fixedByBuildId))
+    .where(and(eq(drops.productId, productId), eq(drops.isSupported, true)))
+    .orderBy(asc(drops.id))
     .all();
 }

@@ -5,10 +5,11 @@ import type { Context } from '../context';
 import { withTransaction } from '../db/with-transaction';
 import { buildJudgements } from '../judging/build-judgements';
 import { ServiceError } from '../service-error';
-import { type DropRow, updateDrop } from './drop-store';
+import { updateDrop } from './drop-store';
 import { type FixingBuild, fixFault, moveFault } from './drop-policy';
 import { findDrop } from './find-drop';
 import { recordDropEvent } from './record-drop-event';
+import type { TracedDrop } from './trace-drop';
 
 /**
  * Moves a drop to another state, as its state and the data allow.
@@ -17,12 +18,13 @@ import { recordDropEvent } from './record-drop-event';
  */
 export function moveDrop(context: Context, actor: Actor, dropId: number, move: DropMove): void {
   withTransaction(context.db, () => {
-    const { drop } = findDrop(context, actor, dropId, 'drops.triage');
+    const found = findDrop(context, actor, dropId, 'drops.triage');
+    const { drop } = found;
     const fault = moveFault(drop.state, move);
     if (fault !== null) throw new ServiceError('conflict', fault);
     const { state, fixedByBuildId } = move;
     const isFix = state === 'fixed' && fixedByBuildId !== undefined;
-    const fix = isFix ? fixingBuild(context, drop, fixedByBuildId) : null;
+    const fix = isFix ? fixingBuild(context, found, fixedByBuildId) : null;
     const unfixed = fix && fixFault(drop, drop.evidence.witnesses, fix);
     if (unfixed) throw new ServiceError('conflict', unfixed);
     updateDrop(context.db, drop.id, {
@@ -37,12 +39,13 @@ export function moveDrop(context: Context, actor: Actor, dropId: number, move: D
   });
 }
 
-function fixingBuild(context: Context, drop: DropRow, buildId: number): FixingBuild {
+function fixingBuild(context: Context, { drop, latest }: TracedDrop, buildId: number): FixingBuild {
   const { build, hardware, firmware } = findBuild(context, drop.productId, buildId);
-  const lostIn = findBuild(context, drop.productId, drop.buildId).build;
+  const lastSeen = findBuild(context, drop.productId, latest.buildId).build;
   return {
     name: `${hardware} / ${firmware}`,
-    isNewer: build.position > lostIn.position,
+    lastSeenIn: `${latest.hardware} / ${latest.firmware}`,
+    isNewer: build.position > lastSeen.position,
     isStale: build.dataVersion > build.judgedVersion,
     judgements: buildJudgements(context, buildId),
   };

@@ -1,9 +1,10 @@
-import type { DropSighting, DropSummary, DropView } from '@shared/contracts/drops';
+import type { DropSummary, DropView } from '@shared/contracts/drops';
 import { isoTime } from '../iso-time';
-import type { DropEvent, NamedDrop } from './drop-store';
+import type { DropEvent } from './drop-store';
+import type { TracedDrop } from './trace-drop';
 
-export function presentDropSummary(named: NamedDrop): DropSummary {
-  const { drop, product, productName, team, hardware, firmware, operatingState, ownerName } = named;
+export function presentDropSummary(traced: TracedDrop): DropSummary {
+  const { drop, product, productName, team, hardware, firmware, operatingState, ownerName } = traced;
   const { id, buildId, band, state, differenceDb, marginDb, frequencyHz, isOverLimit, sentence } = drop;
   return {
     id,
@@ -23,16 +24,11 @@ export function presentDropSummary(named: NamedDrop): DropSummary {
     isOverLimit,
     witnesses: drop.evidence.witnesses.map(({ line, detector }) => ({ line, detector })),
     sentence,
-    latest: ownSighting(named),
-    noLongerSeenIn: null,
+    latest: traced.latest,
+    noLongerSeenIn: traced.noLongerSeenIn,
     createdAt: isoTime(drop.createdAt),
     updatedAt: isoTime(drop.updatedAt),
   };
-}
-
-function ownSighting({ drop, hardware, firmware }: NamedDrop): DropSighting {
-  const { buildId, differenceDb, marginDb, frequencyHz, isOverLimit } = drop;
-  return { buildId, hardware, firmware, differenceDb, marginDb, frequencyHz, isOverLimit };
 }
 
 /** What a drop's page shows beyond its row. */
@@ -40,15 +36,15 @@ export interface DropDetails extends Pick<DropView, 'fixedBy' | 'moves' | 'assig
   readonly events: readonly DropEvent[];
 }
 
-export function presentDrop(named: NamedDrop, { events, ...details }: DropDetails): DropView {
-  const { evidence } = named.drop;
+export function presentDrop(traced: TracedDrop, { events, ...details }: DropDetails): DropView {
+  const { evidence } = traced.drop;
   const remarks = evidence.witnesses.flatMap(({ judgement }) => judgement.remarks);
   return {
-    ...presentDropSummary(named),
+    ...presentDropSummary(traced),
     ...details,
     evidence,
-    seenIn: [ownSighting(named)],
-    buildSwitching: named.buildSwitching,
+    seenIn: [...traced.seenIn],
+    buildSwitching: traced.buildSwitching,
     remarks: [...new Map(remarks.map(({ code, text }) => [text, { code, text }])).values()],
     history: events.map(({ at, actorName, kind, text }) => ({ at: isoTime(at), actor: actorName, kind, text })),
   };

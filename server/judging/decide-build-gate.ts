@@ -3,7 +3,7 @@ import { decideGate, type GateVerdict, type RequiredSeries } from '@shared/judgi
 import { formatDecibels } from '@shared/units/format-decibels';
 import { findBuildOf } from '../builds/find-build';
 import type { Context } from '../context';
-import { findDropsOfBuild } from '../drops/find-drops';
+import { findDropsShownBy } from '../drops/find-drops';
 import type { FoundProduct } from '../products/find-product';
 import { targetMarginOf } from '../products/target-margin';
 import { bindingJudgements } from './binding-judgements';
@@ -73,9 +73,9 @@ function measurementPlan(context: Context, product: FoundProduct['product'], bui
   };
 }
 
-/** Where losses of the build were accepted: by operating state and band. */
+/** Where losses the build shows were accepted, on it or on an earlier build: by operating state and band. */
 function acceptedPlaces(context: Context, buildId: number): (judgement: BandJudgement) => boolean {
-  const drops = findDropsOfBuild(context, buildId).filter(({ state }) => state === 'accepted');
+  const drops = findDropsShownBy(context, buildId).filter(({ state }) => state === 'accepted');
   return ({ stateId, band }) => drops.some((drop) => drop.stateId === stateId && drop.band === band);
 }
 

@@ -42,7 +42,7 @@ export function judgeOneBuild(context: Context, buildId: number): JudgedBuildOut
       judgedAt: judgements.length > 0 ? context.now() : null,
       judgedVersion: record.build.dataVersion,
     });
-    settleDrops(context, JUDGE, { id: buildId, product: record.product }, cases, judgements);
+    settleDrops(context, JUDGE, { ...record.build, product: record.product }, cases, judgements);
     // Later builds may be compared with this one: what it was judged decides whether it belongs to their reference.
     if (isChanged) markStale(context, record.product.id, record.build.position + 1);
     if (hasNewSweeps(former, judgements)) rejudgeNeighbours(context, record);
@@ -75,13 +75,12 @@ function storeVerdicts(
   former: readonly VerdictRow[],
   judgements: readonly BandJudgement[],
 ): boolean {
-  const methodVersion = Number(METHOD_VERSION);
   const standing = new Map(former.map((row) => [placeKey(row), row]));
   let isChanged = false;
   for (const judgement of judgements) {
     const row = standing.get(placeKey(judgement));
     standing.delete(placeKey(judgement));
-    const isSame = row?.methodVersion === methodVersion && JSON.stringify(row.judgement) === JSON.stringify(judgement);
+    const isSame = row?.methodVersion === METHOD_VERSION && JSON.stringify(row.judgement) === JSON.stringify(judgement);
     if (isSame) continue;
     isChanged = true;
     const { stateId, line, detector, band, verdict, overLimit, differenceDb, worst } = judgement;
@@ -97,7 +96,7 @@ function storeVerdicts(
       worstMarginDb: worst?.marginDb ?? null,
       worstFrequencyHz: worst?.frequencyHz ?? null,
       judgement,
-      methodVersion,
+      methodVersion: METHOD_VERSION,
       judgedAt: context.now(),
     });
   }

@@ -5,8 +5,8 @@ export const MAX_POOLED_BUILDS = 5;
 /** The spread is taken from at most this many builds: enough degrees of freedom, and not from a bench of years ago. */
 export const MAX_HISTORY_BUILDS = 20;
 
-/** Reasons of a "cannot say" that leave the measurement itself usable. */
-const USABLE_REASONS: readonly ReasonCode[] = ['withinSpread', 'noReference'];
+/** Reasons of a "cannot say" that leave the measurement itself usable: too few runs, or nothing to compare with. */
+export const USABLE_REASONS: readonly ReasonCode[] = ['withinSpread', 'noReference'];
 
 /** An earlier build with its judgement in the series and band in question; null where it is not yet judged. */
 export interface EarlierBuild {

@@ -174,8 +174,8 @@ describe('fixed', () => {
   });
 
   it('is refused for an older build, and for one that is not judged yet', async () => {
-    expect((await fix(5, 409)).detail).toBe('build C1 / 1.5 is not newer than the build of the drop');
-    expect((await fix(6, 409)).detail).toBe('build C1 / 1.6 is not newer than the build of the drop');
+    expect((await fix(5, 409)).detail).toBe('build C1 / 1.5 is not newer than C1 / 1.6, which shows the loss');
+    expect((await fix(6, 409)).detail).toBe('build C1 / 1.6 is not newer than C1 / 1.6, which shows the loss');
     measureBuild(context, laboratory, 7, { levelsDbuv: [50] });
     expect((await fix(7, 409)).detail).toBe('build C1 / 1.7 has sweeps that are not judged yet: judge it first');
   });

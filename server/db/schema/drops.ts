@@ -27,6 +27,8 @@ export const drops = sqliteTable(
       .references(() => operatingStates.id),
     band: text('band').notNull(),
     state: text('state', { enum: DROP_STATES }).notNull(),
+    /** False once the data no longer show the loss, whatever state somebody gave the drop. */
+    isSupported: integer('is_supported', { mode: 'boolean' }).notNull().default(true),
     ownerId: integer('owner_id').references(() => people.id),
     /** Change of margin of the worst witness, negative. */
     differenceDb: real('difference_db').notNull(),

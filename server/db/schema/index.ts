@@ -6,6 +6,7 @@ export * from './digest-recipients';
 export * from './digest-settings';
 export * from './digests';
 export * from './drop-events';
+export * from './drop-sightings';
 export * from './drops';
 export * from './firmware-revisions';
 export * from './frequency-grids';
