@@ -1,20 +1,11 @@
 import type { BandJudgement } from '@shared/judging/band-judgement';
 import * as z from 'zod';
+import { DROP_STATES, OPEN_DROP_STATES } from './drop-states';
 import { Remark } from './sweeps';
 import { SwitchingStage } from './switching';
 
-export const DROP_STATES = ['new', 'checking', 'causeKnown', 'fixed', 'accepted', 'withdrawn'] as const;
-export type DropState = (typeof DROP_STATES)[number];
-/** States in which somebody still has to act. */
-export const OPEN_DROP_STATES = ['new', 'checking', 'causeKnown'] as const satisfies readonly DropState[];
-export const DROP_STATE_WORDS: Record<DropState, string> = {
-  new: 'new',
-  checking: 'being checked',
-  causeKnown: 'cause known',
-  fixed: 'fixed',
-  accepted: 'accepted',
-  withdrawn: 'withdrawn',
-};
+/** Apart, so that pages take states and words without the schemas. */
+export { DROP_STATE_WORDS, DROP_STATES, type DropState, OPEN_DROP_STATES } from './drop-states';
 export const DROP_EVENT_KINDS = ['raised', 'moved', 'owner', 'note', 'evidence', 'withdrawn'] as const;
 
 /** One series that lost. */

@@ -1,0 +1,84 @@
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import type { DropView } from '@shared/contracts/drops';
+import { findLimitSet } from '@shared/limits/limit-sets';
+import { FrequencyPipe } from '../ui/frequency';
+import { MarginValue } from '../ui/margin-value';
+import { leadWitness } from './lead-witness';
+import { targetWords } from './margin-words';
+import { QuestionBlock } from './question-block';
+import { buildName } from './sighting-words';
+import { SightingsTable } from './sightings-table';
+
+/** Margin to the limit and to the target, and what may be said of meeting the limit. */
+@Component({
+  selector: 'app-left-block',
+  imports: [FrequencyPipe, MarginValue, QuestionBlock, SightingsTable],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `
+    @let judgement = this.lead();
+    <app-question-block question="How much is left?">
+      <p class="margin">
+        <app-margin-value [marginDb]="drop().latest.marginDb" [targetMarginDb]="drop().evidence.targetMarginDb" />
+        <span class="muted small">least margin of the runs in {{ latest() }}</span>
+      </p>
+      <app-sightings-table [drop]="drop()" [teamKey]="teamKey()" />
+      <ul>
+        @if (judgement.worst; as worst) {
+          <li>
+            {{ raisedIn() }}: level <span class="number">{{ worst.levelDbuv.toFixed(1) }} dBµV</span>, limit
+            <span class="number">{{ worst.limitDbuv.toFixed(1) }} dBµV</span> at {{ worst.frequencyHz | frequency }},
+            found between the measured points: {{ limit() }}.
+          </li>
+        }
+        <li>{{ target() }}</li>
+        <li>{{ chance() }}</li>
+      </ul>
+    </app-question-block>
+  `,
+  styles: `
+    .margin {
+      display: flex;
+      flex-wrap: wrap;
+      gap: 0 10px;
+      align-items: baseline;
+    }
+    app-margin-value {
+      font-size: 26px;
+      line-height: 34px;
+    }
+    ul {
+      display: grid;
+      gap: 4px;
+      max-width: 76ch;
+      margin: 0;
+      padding-inline-start: 18px;
+    }
+  `,
+})
+export class LeftBlock {
+  readonly drop = input.required<DropView>();
+  readonly teamKey = input.required<string>();
+
+  protected readonly lead = computed(() => leadWitness(this.drop()).judgement);
+  protected readonly latest = computed(() => buildName(this.drop().latest));
+  protected readonly raisedIn = computed(() => buildName(this.drop()));
+  protected readonly limit = computed(() => {
+    const { limitSetKey, limitSetVersion } = this.drop().evidence;
+    const title = findLimitSet(limitSetKey)?.title ?? limitSetKey;
+    return `${title}, as of its version ${limitSetVersion} here`;
+  });
+  protected readonly target = computed(() => {
+    const { latest, evidence } = this.drop();
+    const words = targetWords(latest.marginDb, evidence.targetMarginDb);
+    return `${words.charAt(0).toUpperCase()}${words.slice(1)}.`;
+  });
+  protected readonly chance = computed(() => {
+    const { pConform } = this.lead();
+    if (pConform !== null)
+      return `Chance that the product meets the limit here, by the team's own uncertainty: ${(100 * pConform).toFixed(0)} %.`;
+    return (
+      `${this.drop().latest.isOverLimit ? 'The reading exceeds the limit' : 'The reading is below the limit'}. How likely the product meets it is ` +
+      `not stated, for the team has entered no measurement uncertainty; in-house results indicate, only an accredited test shows.`
+    );
+  });
+}
