@@ -36,10 +36,10 @@ function intoOriginals(originals: OriginalFiles): multer.StorageEngine {
       stream.on('data', (chunk: Buffer) => chunks.push(chunk));
       stream.on('error', done);
       stream.on('end', () => {
-        if (stream.truncated) return;
         try {
           const bytes = Buffer.concat(chunks);
-          done(null, { filename: originals.keep(bytes), size: bytes.length });
+          // A file cut off at the largest size is refused by multer, which waits to be told that it was dealt with.
+          done(null, { filename: stream.truncated ? '' : originals.keep(bytes), size: bytes.length });
         } catch (error) {
           done(error);
         }

@@ -9,8 +9,8 @@ import { type PreparedGrid, prepareGrid } from '@shared/traces/margins';
 import type { TeamBand } from '../db/schema/teams';
 import { ServiceError } from '../service-error';
 
-/** Most grids a bench park uses at once, times detectors; one of 60,000 points takes 1 MB. */
-const MOST_KEPT = 48;
+/** Most points of all kept grids together: 16 bytes each, and 300 grids of a 9 kHz receiver. */
+const MOST_POINTS = 2_000_000;
 const CELL_EDGES_HZ = cellEdgesHz();
 const kept = new Map<string, KnownGrid>();
 
@@ -55,7 +55,16 @@ export function knownGrid(
   const prepared = prepareGrid(frequenciesHz, line, bandsFor(line, own), CELL_EDGES_HZ);
   const known = { ...prepared, description: describeGrid(frequenciesHz) };
   kept.set(key, known);
-  const oldest = kept.keys().next();
-  if (kept.size > MOST_KEPT && !oldest.done) kept.delete(oldest.value);
+  forgetOldest();
   return known;
+}
+
+/** Forgets grids not used for longest until the rest is small enough; the newest stays whatever its size. */
+function forgetOldest(): void {
+  let points = [...kept.values()].reduce((sum, { description }) => sum + description.pointCount, 0);
+  for (const [key, { description }] of kept) {
+    if (points <= MOST_POINTS || kept.size === 1) return;
+    kept.delete(key);
+    points -= description.pointCount;
+  }
 }

@@ -4,7 +4,10 @@ import * as z from 'zod';
 import { DetectorName, Line, Name, SweepKind, Time } from './primitives';
 import { SwitchingStage } from './switching';
 
-/** `tags` of POST /api/v1/sweeps */
+/**
+ * `tags` of POST /api/v1/sweeps. The query `team` names the owning team where several teams of the caller have a product
+ * with the key.
+ */
 export const SweepTags = z
   .strictObject({
     product: z.string().min(1),

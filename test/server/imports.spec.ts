@@ -160,6 +160,13 @@ describe('a batch of files', () => {
     expect(rows).toMatchObject({ import_batches: 0, import_items: 0, job_runs: 0 });
   });
 
+  it('is refused whole when a file is larger than the installation reads, and keeps nothing of that file', async () => {
+    const large = Buffer.alloc(context.config.maxUploadBytes + 1, '1');
+    const answer = await post([large], planOf([{ file: 0, tags: { line: 'L', detector: 'QP' } }]));
+    expect(answer).toMatchObject({ status: 413, body: { type: '/problems/tooLarge' } });
+    expect(countStored(context)).toMatchObject({ import_batches: 0, files: 0 });
+  });
+
   it('takes the time of the upload where the tags have none, however late it is imported', async () => {
     const uploadedAt = context.now();
     const { tags } = planOf([]);
