@@ -1,0 +1,106 @@
+import { HttpClient } from '@angular/common/http';
+import { ChangeDetectionStrategy, Component, computed, DestroyRef, inject, output, signal } from '@angular/core';
+import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
+import { MatButton } from '@angular/material/button';
+import { MatIcon } from '@angular/material/icon';
+import type { JobRunView } from '@shared/contracts/job-runs';
+import type { Problem } from '@shared/contracts/problem';
+import { exhaustMap, map, Observable, switchMap, takeWhile, timer } from 'rxjs';
+import { problemOf } from '../ui/problem';
+import { ProgressLine } from '../ui/progress-line';
+import { runWords } from './run-words';
+import { ProductInView } from './product-in-view';
+
+const POLL_MS = 1000;
+
+/** Lets a lead have the product judged at once and shows how far the run is; the run goes on when the page is left. */
+@Component({
+  selector: 'app-judge-now',
+  imports: [MatButton, MatIcon, ProgressLine],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `
+    <span class="words small" aria-live="polite" [class.failed]="problem() || run()?.status === 'failed'">{{
+      words()
+    }}</span>
+    <span class="act">
+      <button mat-stroked-button type="button" [disabled]="isBusy()" (click)="judge()">
+        <mat-icon svgIcon="play" />Judge now
+      </button>
+      @if (isBusy()) {
+        <app-progress-line class="line" label="Judging" [doneFraction]="doneFraction()" />
+      }
+    </span>
+  `,
+  styles: `
+    :host {
+      display: flex;
+      flex-wrap: wrap;
+      gap: 4px 12px;
+      align-items: center;
+    }
+    .words:empty {
+      display: none;
+    }
+    .words {
+      max-width: 48ch;
+      color: var(--sl-ink-muted);
+    }
+    .failed {
+      color: var(--sl-lost);
+    }
+    .act {
+      position: relative;
+    }
+    .line {
+      position: absolute;
+      inset: auto 0 -5px;
+    }
+  `,
+})
+export class JudgeNow {
+  private readonly http = inject(HttpClient);
+  private readonly view = inject(ProductInView);
+  private readonly destroyed = inject(DestroyRef);
+
+  readonly finished = output();
+
+  protected readonly run = signal<JobRunView | null>(null);
+  protected readonly isBusy = signal(false);
+  protected readonly problem = signal<Problem | null>(null);
+  protected readonly words = computed(() => this.problem()?.detail ?? runWords(this.run()));
+  protected readonly doneFraction = computed(() => {
+    const run = this.run();
+    return run && run.total > 0 ? run.done / run.total : undefined;
+  });
+
+  protected judge(): void {
+    this.isBusy.set(true);
+    this.problem.set(null);
+    this.run.set(null);
+    this.http
+      .post<{ runs: JobRunView[] }>(`/api/teams/${this.view.owner()}/judge`, { product: this.view.key() })
+      .pipe(
+        map(({ runs }) => runs[0].id),
+        switchMap((id) => this.follow(id)),
+        takeUntilDestroyed(this.destroyed),
+      )
+      .subscribe({
+        next: (run) => this.run.set(run),
+        error: (error: unknown) => {
+          this.problem.set(problemOf(error));
+          this.isBusy.set(false);
+        },
+        complete: () => {
+          this.isBusy.set(false);
+          this.finished.emit();
+        },
+      });
+  }
+
+  private follow(id: number): Observable<JobRunView> {
+    return timer(0, POLL_MS).pipe(
+      exhaustMap(() => this.http.get<JobRunView>(`/api/v1/runs/${id}`)),
+      takeWhile(({ status }) => status === 'waiting' || status === 'running', true),
+    );
+  }
+}
