@@ -42,9 +42,15 @@ function markSuperseded(context: Context, sweeps: readonly RolledSweep[]): Rolle
   });
 }
 
+/** Half the 9 kHz bandwidth, the coarsest step of a scan. Source: CISPR 16-2-1. */
+const SCAN_STEP_HZ = 4500;
+
+/** A QP list of single frequencies decides nothing between them, so it must be a scan. */
 function decidesInstead(other: RolledSweep, peak: RolledSweep): boolean {
   const isSamePlace = other.stateId === peak.stateId && other.line === peak.line;
-  return other.detector === 'QP' && isSamePlace && other.startHz <= peak.startHz && other.stopHz >= peak.stopHz;
+  const isSameRange = other.startHz <= peak.startHz && other.stopHz >= peak.stopHz;
+  const isScan = other.medianStepHz <= Math.max(peak.medianStepHz, SCAN_STEP_HZ);
+  return other.detector === 'QP' && isSamePlace && isSameRange && isScan;
 }
 
 /** The sweep with the least margin; of equal ones the first. */

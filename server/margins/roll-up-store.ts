@@ -10,6 +10,7 @@ export interface RolledSweep {
   detector: string;
   startHz: number;
   stopHz: number;
+  medianStepHz: number;
   isSuperseded: boolean;
   worstMarginDb: number | null;
   worstFrequencyHz: number | null;
@@ -30,6 +31,7 @@ const sweepsOfBuild = prepared((db) =>
       detector: sweeps.detector,
       startHz: frequencyGrids.startHz,
       stopHz: frequencyGrids.stopHz,
+      medianStepHz: frequencyGrids.medianStepHz,
       isSuperseded: sweeps.isSuperseded,
       worstMarginDb: sweeps.worstMarginDb,
       worstFrequencyHz: sweeps.worstFrequencyHz,
