@@ -52,11 +52,9 @@ import { TimeStamp } from '../ui/time-stamp';
       <dt>Used</dt>
       <dd>
         @if (bench.sweepCount > 0) {
-          <a [routerLink]="['/t', team(), 'sweeps']" [queryParams]="{ bench: bench.key }"
-            >{{ bench.sweepCount.toLocaleString('en') }} {{ bench.sweepCount === 1 ? 'sweep' : 'sweeps' }}</a
-          >
+          <a [routerLink]="['/t', team(), 'sweeps']" [queryParams]="{ bench: bench.key }">{{ uses() }}</a>
           @if (bench.lastSweepAt; as at) {
-            , the last <app-time [at]="at" detail="day" />
+            (last <app-time [at]="at" detail="day" />)
           }
         } @else {
           no sweep yet
@@ -118,6 +116,10 @@ export class BenchCard {
   readonly edited = output();
   readonly archived = output<boolean>();
 
+  protected readonly uses = computed(() => {
+    const { sweepCount } = this.bench();
+    return sweepCount === 1 ? 'one sweep' : `${sweepCount.toLocaleString('en')} sweeps`;
+  });
   protected readonly spread = computed(() => {
     const { sdDb, degreesOfFreedom } = this.bench().spread;
     return `${formatDecibels(sdDb)} standard deviation of runs, ${degreesOfFreedom} degrees of freedom`;

@@ -44,9 +44,12 @@ import { MatIcon } from '@angular/material/icon';
       flex: none;
       color: var(--sl-margin-text-tight);
     }
+    div {
+      min-width: 0;
+    }
     ul {
       display: grid;
-      grid-template-columns: repeat(auto-fit, minmax(300px, 1fr));
+      grid-template-columns: repeat(auto-fit, minmax(min(300px, 100%), 1fr));
       gap: 6px 24px;
       margin: 6px 0 8px;
       padding-inline-start: 16px;

@@ -20,6 +20,9 @@ import { keyOfName } from './key-of-name';
     .form {
       max-width: 760px;
     }
+    .form-row {
+      align-items: start;
+    }
   `,
 })
 export class BenchForm {

@@ -72,6 +72,7 @@ export class FileCard {
   protected readonly standing = computed(() => {
     const { reading, problem } = this.file();
     const planned = this.planned();
+    if (problem && this.asksForUnits()) return { word: 'needs its units', icon: 'edit', look: 'open' } as const;
     if (problem) return { word: 'cannot be read', icon: 'error', look: 'bad' } as const;
     if (!reading) return { word: 'reading', icon: 'clock', look: 'quiet' } as const;
     if (planned.length === 0) return { word: 'left out', icon: 'minus', look: 'quiet' } as const;

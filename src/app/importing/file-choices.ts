@@ -12,9 +12,10 @@ import { momentOf, wallTimeOf } from './zoned-time';
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     @let choice = file().choice;
-    <label>
-      State
+    <div>
+      <label [attr.for]="fieldId('state')">State</label>
       <input
+        [id]="fieldId('state')"
         #state
         type="text"
         [attr.list]="listId()"
@@ -28,35 +29,37 @@ import { momentOf, wallTimeOf } from './zoned-time';
           <option [value]="one"></option>
         }
       </datalist>
-    </label>
-    <label>
-      Taken at
+    </div>
+    <div>
+      <label [attr.for]="fieldId('taken-at')">Taken at</label>
       <input
+        [id]="fieldId('taken-at')"
         #takenAt
         type="datetime-local"
         [value]="wallTime()"
         (change)="chosen.emit({ takenAt: moment(takenAt.value) })"
       />
-    </label>
-    <label>
-      Run
+    </div>
+    <div>
+      <label [attr.for]="fieldId('run')">Run</label>
       <input
+        [id]="fieldId('run')"
         #run
         type="text"
         [value]="choice.run ?? ''"
         [placeholder]="common().run ?? 'day and bench'"
         (change)="chosen.emit({ run: words(run.value) })"
       />
-    </label>
-    <label>
-      Role
-      <select #kind (change)="chooseKind(kind.value)">
+    </div>
+    <div>
+      <label [attr.for]="fieldId('role')">Role</label>
+      <select [id]="fieldId('role')" #kind (change)="chooseKind(kind.value)">
         <option value="" [selected]="!choice.kind">as all: {{ kindWords[common().kind ?? 'product'] }}</option>
         @for (one of kinds; track one) {
           <option [value]="one" [selected]="one === choice.kind">{{ kindWords[one] }}</option>
         }
       </select>
-    </label>
+    </div>
   `,
   styleUrl: './file-choices.scss',
 })
@@ -70,11 +73,15 @@ export class FileChoices {
 
   protected readonly kinds = SWEEP_KINDS;
   protected readonly kindWords = KIND_WORDS;
-  protected readonly listId = computed(() => `states-of-file-${this.file().id}`);
+  protected readonly listId = computed(() => this.fieldId('states'));
   protected readonly wallTime = computed(() => {
     const at = this.file().choice.takenAt ?? this.common().takenAt;
     return at === undefined ? '' : wallTimeOf(at, this.team.timeZone());
   });
+
+  protected fieldId(name: string): string {
+    return `${name}-of-file-${this.file().id}`;
+  }
 
   protected words(text: string): string | undefined {
     return text.trim() || undefined;

@@ -23,7 +23,7 @@ import { FileDrop } from './file-drop';
 import { ImportApi } from './import-api';
 import { ImportDraft } from './import-draft';
 import type { HoldsUnsaved } from './keep-unsaved';
-import { plannedTraces, uploadOf } from './plan-import';
+import { plannedTraces, type PlannedTrace, uploadOf } from './plan-import';
 import { explainPlanProblem } from './plan-problem';
 import { RecentBatches } from './recent-batches';
 import { SaveBar } from './save-bar';
@@ -111,6 +111,7 @@ export class ImportPage implements HoldsUnsaved {
 
   protected save(): void {
     const planned = this.planned();
+    this.checkState(planned);
     const firstGap = planned.find(({ gaps }) => gaps.length > 0);
     if (this.form.invalid || firstGap) {
       this.showMissing(firstGap?.fileId);
@@ -128,6 +129,14 @@ export class ImportPage implements HoldsUnsaved {
         this.problem.set(explainPlanProblem(problemOf(error), planned));
       },
     });
+  }
+
+  /** A state is needed in the form only where every trace lacks one: files may name their own. */
+  private checkState(planned: readonly PlannedTrace[]): void {
+    const { state } = this.form.controls;
+    state.updateValueAndValidity();
+    const isMissing = planned.every(({ gaps }) => gaps.some(({ tag }) => tag === 'state'));
+    if (isMissing) state.setErrors({ required: true });
   }
 
   /** Marks what is missing and leads to the first of it: a field of the form, else the file that lacks something. */

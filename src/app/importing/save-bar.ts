@@ -97,9 +97,11 @@ export class SaveBar {
     if (planned.length === 0) return 'No trace to save';
     return `${counted(planned.length, 'sweep')} from ${counted(new Set(planned.map(({ fileId }) => fileId)).size, 'file')}`;
   });
-  protected readonly action = computed(() =>
-    this.isSaving() ? 'Saving…' : `Save ${counted(this.planned().length, 'sweep')}`,
-  );
+  protected readonly action = computed(() => {
+    if (this.isSaving()) return 'Saving…';
+    const { length } = this.planned();
+    return length === 0 ? 'Save' : `Save ${counted(length, 'sweep')}`;
+  });
 }
 
 function counted(count: number, thing: string): string {

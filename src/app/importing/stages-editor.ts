@@ -1,9 +1,11 @@
 import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { toObservable, toSignal } from '@angular/core/rxjs-interop';
 import { FormArray, FormGroup, ReactiveFormsModule } from '@angular/forms';
 import { MatButton, MatIconButton } from '@angular/material/button';
 import { MatFormFieldModule } from '@angular/material/form-field';
 import { MatIcon } from '@angular/material/icon';
 import { MatInput } from '@angular/material/input';
+import { map, startWith, switchMap } from 'rxjs';
 import { FieldErrorPipe } from '../ui/field-error';
 import { StageControls, stageGroup } from './tags-form';
 
@@ -15,7 +17,7 @@ const MOST_STAGES = 8;
   imports: [FieldErrorPipe, MatButton, MatFormFieldModule, MatIcon, MatIconButton, MatInput, ReactiveFormsModule],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    @for (stage of stages().controls; track stage; let place = $index) {
+    @for (stage of shown(); track stage; let place = $index) {
       <div class="stage" [formGroup]="stage">
         <mat-form-field>
           <mat-label>Stage</mat-label>
@@ -38,7 +40,7 @@ const MOST_STAGES = 8;
       </div>
     }
     <div class="acts">
-      <button mat-button type="button" [disabled]="stages().length >= most" (click)="add()">
+      <button mat-button type="button" [disabled]="shown().length >= most" (click)="add()">
         <mat-icon svgIcon="add" />Add a stage
       </button>
       <ng-content />
@@ -65,6 +67,18 @@ export class StagesEditor {
   readonly stages = input.required<FormArray<FormGroup<StageControls>>>();
 
   protected readonly most = MOST_STAGES;
+  /** Follows the form, which the page around it fills as well. */
+  protected readonly shown = toSignal(
+    toObservable(this.stages).pipe(
+      switchMap((stages) =>
+        stages.valueChanges.pipe(
+          startWith(null),
+          map(() => [...stages.controls]),
+        ),
+      ),
+    ),
+    { initialValue: [] },
+  );
 
   protected add(): void {
     this.stages().push(stageGroup());

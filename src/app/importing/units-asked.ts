@@ -8,28 +8,29 @@ import type { Units } from './draft-file';
   selector: 'app-units-asked',
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <label>
-      Frequencies in
-      <select (change)="chooseFrequency(frequency.value)" #frequency>
-        <option value="" [selected]="!units().frequencyUnit">as the file says</option>
+    <div class="field">
+      <label for="frequency-unit-of-{{ fileId() }}">Frequencies in</label>
+      <select id="frequency-unit-of-{{ fileId() }}" (change)="chooseFrequency(frequency.value)" #frequency>
+        <option value="" [selected]="!units().frequencyUnit">as in the file</option>
         @for (unit of frequencyUnits; track unit) {
           <option [value]="unit" [selected]="unit === units().frequencyUnit">{{ unit }}</option>
         }
       </select>
-    </label>
-    <label>
-      Levels in
-      <select (change)="chooseLevel(level.value)" #level>
-        <option value="" [selected]="!units().levelUnit">as the file says</option>
+    </div>
+    <div class="field">
+      <label for="level-unit-of-{{ fileId() }}">Levels in</label>
+      <select id="level-unit-of-{{ fileId() }}" (change)="chooseLevel(level.value)" #level>
+        <option value="" [selected]="!units().levelUnit">as in the file</option>
         @for (unit of levelUnits; track unit.key) {
           <option [value]="unit.key" [selected]="unit.key === units().levelUnit">{{ unit.words }}</option>
         }
       </select>
-    </label>
+    </div>
   `,
   styleUrl: './units-asked.scss',
 })
 export class UnitsAsked {
+  readonly fileId = input.required<number>();
   readonly units = input.required<Units>();
   readonly chosen = output<Units>();
 

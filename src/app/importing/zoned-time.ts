@@ -1,5 +1,6 @@
 /**
- * The moment at which the clocks of a time zone show a wall time; the hour that a change of clocks skips counts as after it.
+ * The moment at which the clocks of a time zone show a wall time. Where clocks are set, an hour that is skipped counts on from
+ * before the change, and of an hour that comes twice the second is meant.
  *
  * @param wallTime as a `datetime-local` field gives it, "2026-03-02T09:20"
  * @param timeZone IANA name

@@ -1,10 +1,10 @@
 import { httpResource } from '@angular/common/http';
-import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { Router } from '@angular/router';
 import type { LimitSetView } from '@shared/contracts/limits';
-import type { LimitLine } from '@shared/limits/limit-line';
 import { formatFrequency } from '@shared/units/format-frequency';
+import { FULL_RANGE_HZ } from '../ui/chart/frequency-scale';
 import { SpectrumChart } from '../ui/chart/spectrum-chart';
 import type { SpectrumLimit, SpectrumMark, SpectrumView } from '../ui/chart/spectrum-types';
 import { PageHeader } from '../ui/page-header';
@@ -12,6 +12,7 @@ import { problemOf } from '../ui/problem';
 import { ProblemBanner } from '../ui/problem-banner';
 import { Skeleton } from '../ui/skeleton';
 import { chosenSets, readAtHz } from './limits-address';
+import { namedLines } from './named-lines';
 import { LimitReader } from './limit-reader';
 import { LimitSetCard } from './limit-set-card';
 
@@ -38,11 +39,9 @@ export class LimitsPage {
   protected readonly chosen = computed(() => (this.all.hasValue() ? chosenSets(this.all.value(), this.sets()) : []));
   protected readonly frequencyHz = computed(() => readAtHz(this.at()));
 
-  protected readonly limits = computed((): SpectrumLimit[] =>
-    this.chosen().flatMap(({ title, lines }) =>
-      lines.map((line) => ({ name: `${title}, ${line.detector}`, line: line as LimitLine })),
-    ),
-  );
+  /** Right end of the chart: names are written there. */
+  private readonly rightEndHz = signal<number>(FULL_RANGE_HZ.toHz);
+  protected readonly limits = computed((): SpectrumLimit[] => namedLines(this.chosen(), this.rightEndHz()));
   protected readonly marks = computed((): SpectrumMark[] => [
     { frequencyHz: this.frequencyHz(), label: formatFrequency(this.frequencyHz()) },
   ]);
@@ -62,7 +61,8 @@ export class LimitsPage {
   }
 
   /** A click in the chart reads the limits there. */
-  protected readAtPin({ pinsHz }: SpectrumView): void {
+  protected followChart({ pinsHz, toHz }: SpectrumView): void {
+    this.rightEndHz.set(toHz);
     const pinHz = pinsHz.at(-1);
     if (pinHz !== undefined) this.read(pinHz);
   }

@@ -46,8 +46,8 @@ export function setUpFacts(sweep: SweepView): Fact[] {
 export function removalText(sweep: SweepView): string {
   const { id, hardware, firmware, state, line, detector, productName } = sweep;
   return (
-    `Sweep ${id} of ${productName} ${hardware} / ${firmware} (${state}, ${line} ${detector}) is removed with its margins ` +
-    'and its original file, and the build and those after it are judged anew. Drops keep the evidence they were raised on. ' +
-    'This cannot be undone; the same file can be imported again.'
+    `Sweep ${id} of ${productName} ${hardware} / ${firmware} (${state}, ${line} ${detector}) is removed with its margins, ` +
+    'and with its original file unless other sweeps came from it. The build and those after it are judged anew. ' +
+    'Drops keep the evidence they were raised on. This cannot be undone; the same file can be imported again.'
   );
 }

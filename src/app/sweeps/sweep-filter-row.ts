@@ -44,15 +44,16 @@ const KIND_OPTIONS = SWEEP_KINDS.map((kind) => ({ key: kind, words: KIND_WORDS[k
   `,
   styles: `
     .mat-mdc-form-field {
-      width: 176px;
+      width: 132px;
     }
-    .line,
+    .product {
+      width: 192px;
+    }
+    .line {
+      width: 100px;
+    }
     .detector {
-      width: 104px;
-    }
-    .kind,
-    .bench {
-      width: 144px;
+      width: 124px;
     }
   `,
 })

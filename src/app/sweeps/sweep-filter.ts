@@ -25,7 +25,7 @@ export function filterOfAddress(query: Readonly<Partial<Record<SweepFilterName, 
     detector: DETECTORS.find((detector) => detector === query.detector),
     kind: SWEEP_KINDS.find((kind) => kind === query.kind),
   };
-  return Object.fromEntries(Object.entries(all).filter(([, content]) => content !== undefined)) as SweepFilter;
+  return Object.fromEntries(Object.entries(all).filter(([, content]) => content !== undefined));
 }
 
 /** Query parameters of a changed filter: states and builds belong to a product, and a changed list begins at its top. */
