@@ -130,8 +130,9 @@ function takeBack(
 ): string {
   deleteSighting(context.db, drop.id, build.id);
   const isLost = place.some(({ verdict }) => verdict === 'lost');
-  if (former !== null && isLost) return `Not the same loss in ${nameOf(build)} after all.`;
-  return `Not ${former === null ? 'gone' : 'seen'} in ${nameOf(build)} after all: ${describeStanding(place)}`;
+  if (former !== null && isLost) return `The loss in ${nameOf(build)} is another one.`;
+  const what = former === null ? 'no longer shows the margin back' : 'is no longer judged lost';
+  return `${nameOf(build)} ${what}: ${describeStanding(place)}`;
 }
 
 function isOpen({ drop }: StandingDrop): boolean {

@@ -20,8 +20,8 @@ export interface PlaceLoss {
  * Tells whether a build lost still more than an earlier one that had lost already.
  *
  * In a series the build lost: mean margin now less mean margin then at or below minus the threshold, with a one-sided p of
- * 0.01 or less. The threshold alone would not do: two single runs differ by 2 dB once in 40 times where nothing changed
- * (two runs of 0.7 dB spread: 1.0 dB, so 2 dB is 2.0 sigma).
+ * 0.01 or less. The threshold alone would not do: with 0.7 dB of spread a single run is 2 dB below another once in 46 times
+ * where nothing changed (0.7 dB * sqrt 2 = 0.99 dB; Phi(-2.02) = 0.022).
  *
  * @param now the later build
  * @param then the earlier one; series it was not soundly measured in are left out
@@ -65,8 +65,9 @@ function lostSeries(now: PlaceLoss, then: PlaceLoss): { test: ChangeTest; thresh
     const before = then.judgements.find((other) => isSameSeries(one, other) && isSound(other));
     if (one.verdict !== 'lost' || one.spread === null || one.meanMarginDb === null) return [];
     if (before === undefined || before.meanMarginDb === null) return [];
-    const differenceDb = one.meanMarginDb - before.meanMarginDb;
-    const test = testChange(differenceDb, one.spread, one.buildRuns, before.buildRuns);
+    // The wider of the two may hold a step between the builds it was taken from.
+    const spread = before.spread !== null && before.spread.sdDb < one.spread.sdDb ? before.spread : one.spread;
+    const test = testChange(one.meanMarginDb - before.meanMarginDb, spread, one.buildRuns, before.buildRuns);
     return [{ test, thresholdDb: one.thresholdDb }];
   });
 }

@@ -2,7 +2,7 @@ import { eq } from 'drizzle-orm';
 import type { Express } from 'express';
 import request from 'supertest';
 import { createApp } from '../../server/app';
-import { auditEntries, builds, drops, productShares } from '../../server/db/schema';
+import { auditEntries, builds, drops, dropSightings, productShares, referenceChoices } from '../../server/db/schema';
 import { judgeProductNow } from '../../server/judging/judge-stale-builds';
 import { buildLaboratory, dayOf, type Laboratory, measureBuild, measureQuietBuilds } from '../builders/bench-day';
 import { buildPerson, buildTeam, buildToken } from '../builders/team-builder';
@@ -94,6 +94,35 @@ describe('the list of drops', () => {
     const { body } = await engineer.get(`/api/teams/${laboratory.team.key}/drops`).expect(200);
     expect(body.map((one: { band: string }) => one.band)).toEqual(['e', 'c', 'd', 'b', '0.15-0.5 MHz', 'f']);
   });
+
+  it('ranks by what is left in the newest build that shows the loss', async () => {
+    const [first] = context.db.select().from(drops).all();
+    if (first === undefined) throw new Error('there is no drop');
+    const { id: _id, ...row } = first;
+    context.db
+      .insert(drops)
+      .values({ ...row, band: 'b', marginDb: 3 })
+      .run();
+    measureBuild(context, laboratory, 7, { levelsDbuv: [50] });
+    const loss = { differenceDb: -9, marginDb: 1, frequencyHz: 159e3, isOverLimit: false, harmonic: null };
+    context.db
+      .insert(dropSightings)
+      .values({ dropId: 1, buildId: buildId(7), loss })
+      .run();
+    const path = `/api/teams/${laboratory.team.key}/drops`;
+    const ranked = async () => (await engineer.get(path).expect(200)).body.map((one: { id: number }) => one.id);
+    expect(await ranked()).toEqual([1, 2]);
+    context.db
+      .update(dropSightings)
+      .set({ loss: { ...loss, marginDb: 8 } })
+      .run();
+    expect(await ranked()).toEqual([2, 1]);
+    context.db
+      .update(dropSightings)
+      .set({ loss: { ...loss, marginDb: 8, isOverLimit: true } })
+      .run();
+    expect(await ranked()).toEqual([1, 2]);
+  });
 });
 
 describe('a drop', () => {
@@ -105,6 +134,39 @@ describe('a drop', () => {
     expect(body.moves).toEqual(['checking', 'causeKnown', 'fixed', 'accepted']);
     expect(body.assignable).toEqual([{ id: engineerId, name: 'Ada Vane' }]);
     expect(body.remarks.map((one: { code: string }) => one.code)).toContain('noBackground');
+  });
+
+  it('shows the builds it was seen in, what is left in the newest, and the one whose margin is back', async () => {
+    const { team, product } = laboratory;
+    context.db
+      .insert(referenceChoices)
+      .values({ productId: product.id, buildId: buildId(5), chosenBy: engineerId, chosenAt: 1, reason: 'released' })
+      .run();
+    measureBuild(context, laboratory, 7, { levelsDbuv: [56.5, 56.3] });
+    judgeProductNow(context, product.id);
+    const seen = { hardware: 'C1', frequencyHz: 159_000, isOverLimit: false };
+    const { body: carried } = await engineer.get('/api/v1/drops/1').expect(200);
+    expect(carried.seenIn).toEqual([
+      { ...seen, buildId: buildId(6), firmware: '1.6', differenceDb: carried.differenceDb, marginDb: carried.marginDb },
+      {
+        ...seen,
+        buildId: buildId(7),
+        firmware: '1.7',
+        differenceDb: expect.closeTo(-6.7, 5),
+        marginDb: expect.any(Number),
+      },
+    ]);
+    expect(carried.latest).toEqual(carried.seenIn[1]);
+    expect(carried).toMatchObject({ firmware: '1.6', noLongerSeenIn: null, state: 'new' });
+    measureBuild(context, laboratory, 8, { levelsDbuv: [49.8, 49.9, 49.7] });
+    judgeProductNow(context, product.id);
+    const { body } = await engineer.get(`/api/teams/${team.key}/drops`).expect(200);
+    expect(body).toEqual([
+      expect.objectContaining({
+        latest: carried.latest,
+        noLongerSeenIn: { id: buildId(8), hardware: 'C1', firmware: '1.8' },
+      }),
+    ]);
   });
 
   it('is taken, checked, noted and closed with every step in its history and the audit log', async () => {
@@ -178,6 +240,13 @@ describe('fixed', () => {
     expect((await fix(6, 409)).detail).toBe('build C1 / 1.6 is not newer than C1 / 1.6, which shows the loss');
     measureBuild(context, laboratory, 7, { levelsDbuv: [50] });
     expect((await fix(7, 409)).detail).toBe('build C1 / 1.7 has sweeps that are not judged yet: judge it first');
+  });
+
+  it('is refused for a build older than one that shows the loss again', async () => {
+    measureBuild(context, laboratory, 7, { levelsDbuv: [50, 50.2] });
+    measureBuild(context, laboratory, 8, { levelsDbuv: [56, 56.2] });
+    judgeProductNow(context, laboratory.product.id);
+    expect((await fix(7, 409)).detail).toBe('build C1 / 1.7 is not newer than C1 / 1.8, which shows the loss');
   });
 
   it('is refused for a build that held the lower margin: it still has the loss', async () => {

@@ -2,7 +2,7 @@ import { eq } from 'drizzle-orm';
 import type { Express } from 'express';
 import request, { type Test } from 'supertest';
 import { createApp } from '../../server/app';
-import { drops, operatingStates } from '../../server/db/schema';
+import { drops, operatingStates, referenceChoices } from '../../server/db/schema';
 import { judgeProductNow } from '../../server/judging/judge-stale-builds';
 import { buildLaboratory, type Laboratory, measureBuild } from '../builders/bench-day';
 import { buildPerson, buildTeam, buildToken } from '../builders/team-builder';
@@ -89,6 +89,25 @@ describe('the gate', () => {
     expect(body.verdict).toBe('pass');
     expect(body.reasons.map(({ code }: { code: string }) => code)).toEqual(['acceptedLoss', 'acceptedLoss']);
     expect((await gate('1.6', '&targetMarginDb=12').expect(200)).body.verdict).toBe('fail');
+  });
+
+  it('goes on with a loss that was accepted on an earlier build, and stops at one that grew since', async () => {
+    context.db
+      .insert(referenceChoices)
+      .values({ productId: laboratory.product.id, buildId: 5, chosenBy: leadId, chosenAt: 1, reason: 'released' })
+      .run();
+    measureBoth(6, [56.2, 56.4]);
+    judge();
+    measureBoth(7, [56.3, 56.4]);
+    judge();
+    expect((await gate('1.7').expect(200)).body.verdict).toBe('fail');
+    context.db.update(drops).set({ state: 'accepted' }).run();
+    const { body } = await gate('1.7').expect(200);
+    expect(body.verdict).toBe('pass');
+    expect(body.reasons.map(({ code }: { code: string }) => code)).toEqual(['acceptedLoss', 'acceptedLoss']);
+    measureBoth(8, [59.3, 59.4]);
+    judge();
+    expect((await gate('1.8').expect(200)).body.verdict).toBe('fail');
   });
 
   it('fails what is over the limit', async () => {
