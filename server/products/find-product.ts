@@ -4,6 +4,7 @@ import type { Actor } from '../actor';
 import type { Context } from '../context';
 import { requirePermission } from '../require-permission';
 import { ServiceError } from '../service-error';
+import { teamById } from '../teams/find-team';
 import { findProductById, findReachableProducts, type Product, type ProductOfTeam, listShares } from './product-store';
 
 export interface FoundProduct extends ProductOfTeam {
@@ -63,7 +64,9 @@ export function productById(context: Context, id: number): Product {
   return product;
 }
 
+/** A share ends when the team that gave it is archived. */
 function isReadThroughShare(context: Context, actor: Actor, product: Product): boolean {
+  if (teamById(context, product.teamId).isArchived) return false;
   return listShares(context.db, product.id).some((team) => may(actor, 'results.read', team.id));
 }
 

@@ -1,3 +1,4 @@
+import { belongsTo } from '@shared/access/may';
 import type { Action } from '@shared/access/permissions';
 import type { Actor } from '../actor';
 import type { Context } from '../context';
@@ -12,7 +13,9 @@ import { findTeamById, findTeamByKey, type Team } from './team-store';
  */
 export function findTeam(context: Context, actor: Actor, key: string, action: Action): Team {
   const team = findTeamByKey(context.db, key);
-  if (team === undefined || team.isArchived) throw new ServiceError('notFound', `there is no team "${key}" for you`);
+  if (team === undefined || team.isArchived || !belongsTo(actor, team.id)) {
+    throw new ServiceError('notFound', `there is no team "${key}" for you`);
+  }
   requirePermission(actor, action, team.id);
   return team;
 }
