@@ -1,5 +1,6 @@
 import { groupBy } from '@shared/collections/group-by';
-import { OVERLAY_MOST_TRACES, type OverlayQuery, type OverlayTrace } from '@shared/contracts/sweeps';
+import { OVERLAY_MOST_TRACES } from '@shared/contracts/overlay-most-traces';
+import type { OverlayQuery, OverlayTrace } from '@shared/contracts/sweeps';
 import type { Frames } from '@shared/traces/frames';
 import type { Context } from '../context';
 import type { FoundProduct } from '../products/find-product';

@@ -1,6 +1,7 @@
 import { FREQUENCY_UNITS } from '@shared/units/frequency-unit';
 import { LEVEL_UNITS } from '@shared/units/level-unit';
 import * as z from 'zod';
+import { OVERLAY_MOST_TRACES } from './overlay-most-traces';
 import { DetectorName, Line, Name, SweepKind, Time } from './primitives';
 import { SwitchingStage } from './switching';
 
@@ -118,8 +119,6 @@ export const TraceView = z
   })
   .meta({ id: 'Trace' });
 
-/** Most traces one overlay holds. */
-export const OVERLAY_MOST_TRACES = 40;
 const Ids = z
   .string()
   .transform((text) => (text === '' ? [] : text.split(',').map(Number)))

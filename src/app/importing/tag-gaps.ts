@@ -1,3 +1,4 @@
+import '../ui/zod-without-eval';
 import { SweepTags } from '@shared/contracts/sweeps';
 
 export type TagName = keyof SweepTags;

@@ -1,4 +1,5 @@
-import { OVERLAY_MOST_TRACES, type SweepView } from '@shared/contracts/sweeps';
+import { OVERLAY_MOST_TRACES } from '@shared/contracts/overlay-most-traces';
+import type { SweepView } from '@shared/contracts/sweeps';
 
 export interface OverlayLink {
   readonly product: string;

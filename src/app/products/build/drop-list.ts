@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, inject, input } from '@angular/core';
 import { RouterLink } from '@angular/router';
-import { DROP_STATE_WORDS, type DropSummary } from '@shared/contracts/drops';
+import { DROP_STATE_WORDS } from '@shared/contracts/drop-states';
+import type { DropSummary } from '@shared/contracts/drops';
 import { MarginValue } from '../../ui/margin-value';
 import { SignedDecibelsPipe } from '../../ui/signed-decibels';
 import { ProductInView } from '../product-in-view';

@@ -1,0 +1,2 @@
+/** More traces than this in one overlay are refused: nobody tells them apart. */
+export const OVERLAY_MOST_TRACES = 40;
