@@ -17,10 +17,19 @@ export function attentionWords(product: ProductSummary): string {
   return parts.filter(Boolean).join('; ');
 }
 
-function marginWords({ latestBuild, targetMarginDb }: ProductSummary): string {
+function marginWords(product: ProductSummary): string {
+  const { latestBuild, previousWorstMarginDb, targetMarginDb } = product;
   if (latestBuild === null) return '';
-  const { hardware, firmware, worstMarginDb: marginDb, worstFrequencyHz: frequencyHz } = latestBuild;
-  if (marginDb === null) return `build ${hardware} / ${firmware} is not measured`;
+  const { hardware, firmware, worstMarginDb, worstFrequencyHz } = latestBuild;
+  if (worstMarginDb !== null) return reachWords(worstMarginDb, worstFrequencyHz, targetMarginDb);
+  const before =
+    previousWorstMarginDb === null
+      ? ''
+      : `, the last measured build: ${reachWords(previousWorstMarginDb, null, targetMarginDb)}`;
+  return `build ${hardware} / ${firmware} is not measured${before}`;
+}
+
+function reachWords(marginDb: number, frequencyHz: number | null, targetMarginDb: number): string {
   const place = frequencyHz === null ? '' : ` at ${formatFrequency(frequencyHz)}`;
   // Rounded to 0.1 dB a margin of -0.04 dB would read "0.0 dB" though the limit is exceeded.
   if (marginDb < 0) return `${marginDb > -0.05 ? 'just' : formatDecibels(-marginDb)} over the limit${place}`;

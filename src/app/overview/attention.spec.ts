@@ -60,6 +60,17 @@ describe('urgency of a product', () => {
   });
 });
 
+describe('a latest build that nobody measured', () => {
+  const unmeasured = product('a', { worstMarginDb: null, worstFrequencyHz: null }, { previousWorstMarginDb: -2.5 });
+
+  it('hides nothing of how the last measured build stood', () => {
+    expect(urgencyOf(unmeasured)).toBe('over');
+    expect(attentionWords(unmeasured)).toBe(
+      'build C2 / 4.1.0 is not measured, the last measured build: 2.5 dB over the limit',
+    );
+  });
+});
+
 describe('words of the overview', () => {
   it('says how far over the limit, where, and how many drops are open', () => {
     expect(attentionWords(product('a', { worstMarginDb: -2.4997 }, { openDrops: 9 }))).toBe(

@@ -41,32 +41,34 @@ export interface ReferenceDialogData {
             : 'Compare with builds judged held'
         }}
       </h2>
-      <mat-dialog-content class="form">
-        @if (problem(); as problem) {
-          <app-problem-banner [problem]="problem" kept="The reference is as it was." [shownPaths]="['reason']" />
-        }
-        <p>
-          {{
-            data.build
-              ? 'Builds after it are judged against this build from now on.'
-              : 'Each build is judged against the pooled mean of the latest builds judged held.'
-          }}
-          Every build of the product is judged anew; drops that the data no longer support are withdrawn, with a line in
-          their history.
-        </p>
-        <mat-form-field>
-          <mat-label>Reason</mat-label>
-          <textarea
-            matInput
-            rows="2"
-            formControlName="reason"
-            placeholder="Release that went to the test house"
-            cdkFocusInitial
-          ></textarea>
-          <mat-hint>Kept with your name and the date.</mat-hint>
-          <mat-error>{{ form.controls.reason | fieldError }}</mat-error>
-        </mat-form-field>
-      </mat-dialog-content>
+      <mat-dialog-content
+        ><div class="form">
+          @if (problem(); as problem) {
+            <app-problem-banner [problem]="problem" kept="The reference is as it was." [shownPaths]="['reason']" />
+          }
+          <p>
+            {{
+              data.build
+                ? 'Builds after it are judged against this build from now on.'
+                : 'Each build is judged against the pooled mean of the latest builds judged held.'
+            }}
+            Every build of the product is judged anew; drops that the data no longer support are withdrawn, with a line
+            in their history.
+          </p>
+          <mat-form-field>
+            <mat-label>Reason</mat-label>
+            <textarea
+              matInput
+              rows="2"
+              formControlName="reason"
+              placeholder="Release that went to the test house"
+              cdkFocusInitial
+            ></textarea>
+            <mat-hint>Kept with your name and the date.</mat-hint>
+            <mat-error>{{ form.controls.reason | fieldError }}</mat-error>
+          </mat-form-field>
+        </div></mat-dialog-content
+      >
       <mat-dialog-actions align="end">
         <button mat-button type="button" mat-dialog-close>Cancel</button>
         <button mat-flat-button type="submit" [disabled]="busy()">Choose as reference</button>

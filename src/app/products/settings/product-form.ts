@@ -1,5 +1,5 @@
 import { HttpClient, httpResource } from '@angular/common/http';
-import { ChangeDetectionStrategy, Component, effect, inject, input, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, effect, inject, input, signal } from '@angular/core';
 import { NonNullableFormBuilder, ReactiveFormsModule, Validators } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { MatFormFieldModule } from '@angular/material/form-field';
@@ -43,6 +43,8 @@ export class ProductForm {
 
   protected readonly limits = httpResource<LimitSetView[]>(() => '/api/v1/limits', { defaultValue: [] });
   protected readonly teamTargetDb = inject(CurrentTeam).targetMarginDb;
+  /** Their margins are to the present limit, so that it stays. */
+  protected readonly hasSweeps = computed(() => this.product().lines.length > 0);
   protected readonly busy = signal(false);
   protected readonly problem = signal<Problem | null>(null);
   protected readonly fields = ['name', 'description', 'limitSetKey', 'targetMarginDb'] as const;
@@ -59,6 +61,7 @@ export class ProductForm {
       if (!this.form.dirty) this.form.setValue({ name, description, limitSetKey, targetMarginDb });
       if (this.view.may('products.edit')) this.form.enable({ emitEvent: false });
       else this.form.disable({ emitEvent: false });
+      if (this.hasSweeps()) this.form.controls.limitSetKey.disable({ emitEvent: false });
     });
   }
 
