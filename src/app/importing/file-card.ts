@@ -8,9 +8,11 @@ import { FileChoices } from './file-choices';
 import { traceTags } from './merge-tags';
 import type { PlannedTrace } from './plan-import';
 import { ReadingFacts } from './reading-facts';
+import { alikeTraces } from './alike-traces';
 import { asksForUnits } from './reading-fault';
 import { ReadingProblem } from './reading-problem';
-import { missingWords, type TagName } from './tag-gaps';
+import { missingWords } from './tag-gaps';
+import type { TagName } from './tag-words';
 import { TracePreview } from './trace-preview';
 import { ChosenTrace, TraceRows } from './trace-rows';
 import { UnitsAsked } from './units-asked';
@@ -60,6 +62,8 @@ export class FileCard {
     ...this.common(),
     ...traceTags(this.file(), this.shown(), this.common()),
   }));
+
+  protected readonly alikes = computed(() => alikeTraces(this.planned()));
 
   protected readonly summary = computed(() => {
     const { reading } = this.file();

@@ -1,6 +1,6 @@
 import type { Problem } from '@shared/contracts/problem';
 import type { PlannedTrace } from './plan-import';
-import { type TagName, tagWords } from './tag-gaps';
+import { type TagName, tagWords } from './tag-words';
 
 /**
  * A refused plan in the person's words: the server names items by number (`items.3.tags.state`), the page by file and trace.

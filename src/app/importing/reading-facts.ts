@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { MatIcon } from '@angular/material/icon';
 import type { ReadingView } from '@shared/contracts/imports';
+import { remarksOnSettings } from '@shared/traces/sweep-remarks';
 import { formatFrequency } from '@shared/units/format-frequency';
 
 const DELIMITER_WORDS: Record<string, string> = { ',': 'comma', ';': 'semicolon', '\t': 'tab' };
@@ -25,7 +26,7 @@ const DELIMITER_WORDS: Record<string, string> = { ',': 'comma', ';': 'semicolon'
         >: {{ one.why }}
       </p>
     }
-    @for (remark of reading().remarks; track remark.code) {
+    @for (remark of remarks(); track remark.code) {
       <p><mat-icon class="inline-icon" svgIcon="note" />{{ remark.text }}</p>
     }
   `,
@@ -57,6 +58,17 @@ const DELIMITER_WORDS: Record<string, string> = { ',': 'comma', ';': 'semicolon'
 })
 export class ReadingFacts {
   readonly reading = input.required<ReadingView>();
+  /** Resolution bandwidth of the tags, for a file that states none. */
+  readonly taggedRbwHz = input<number>();
+
+  /** A bandwidth that the tags add is reckoned with as it will be on saving. */
+  protected readonly remarks = computed(() => {
+    const rbwHz = this.taggedRbwHz();
+    const reading = this.reading();
+    return reading.rbwHz === null && rbwHz !== undefined
+      ? remarksOnSettings({ rbwHz, grid: reading })
+      : reading.remarks;
+  });
 
   protected readonly facts = computed(() => {
     const { pointCount, startHz, stopHz, medianStepHz, frequencyUnit, traces, ...file } = this.reading();

@@ -24,23 +24,25 @@ describe('readingFault', () => {
     });
   });
 
-  it('keeps the sentence of a contradiction, which names both sides', () => {
-    const fault = readingFault({
+  it('says a contradiction once, with the words people have for the tag, and what to do', () => {
+    const contradiction: Problem = {
       ...unreadable,
       type: '/problems/contradiction',
-      detail: 'detector: the file says QP, the tags say AV',
+      detail: 'rbwHz: the file says 9 kHz, the tags say 120 kHz',
       line: undefined,
       column: undefined,
-      found: 'QP',
-      expected: 'AV',
-      advice: 'Choose trace 2.',
-    });
-    expect(fault).toMatchObject({
+      found: '9 kHz',
+      expected: '120 kHz',
+    };
+    expect(readingFault(contradiction)).toEqual({
       place: '',
       line: null,
-      happened: 'detector: the file says QP, the tags say AV',
-      advice: 'Choose trace 2.',
+      found: '',
+      expected: '',
+      happened: 'Resolution bandwidth: the file says 9 kHz, the tags say 120 kHz',
+      advice: 'Correct the tag, or leave it to the file, and import the file again.',
     });
+    expect(readingFault({ ...contradiction, advice: 'Choose trace 2.' }).advice).toBe('Choose trace 2.');
   });
 
   it('starts a place that is a column alone with a capital', () => {

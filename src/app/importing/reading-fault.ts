@@ -1,5 +1,6 @@
 import type { Problem } from '@shared/contracts/problem';
 import { adviceOn } from '../ui/problem';
+import { type TagName, tagWords } from './tag-words';
 
 export interface ReadingFault {
   /** "Line 214, column 2"; empty when the fault is not in one place. */
@@ -17,15 +18,26 @@ export interface ReadingFault {
 export function readingFault(problem: Problem): ReadingFault {
   const { line, column, found = '', expected = '' } = problem;
   const places = [line && `line ${line}`, column && `column ${column}`].filter(Boolean).join(', ');
-  const isPlaced = problem.type === '/problems/unreadable' && found !== '';
+  const fault = { place: capital(places), line: line ?? null, advice: adviceOn(problem) };
+  if (problem.type === '/problems/unreadable' && found !== '') return { ...fault, found, expected, happened: '' };
+  const isContradiction = problem.type === '/problems/contradiction';
   return {
-    place: places.charAt(0).toUpperCase() + places.slice(1),
-    line: line ?? null,
-    found,
-    expected,
-    happened: isPlaced ? '' : problem.detail,
-    advice: adviceOn(problem),
+    ...fault,
+    found: '',
+    expected: '',
+    happened: inWords(problem.detail),
+    advice:
+      fault.advice || (isContradiction ? 'Correct the tag, or leave it to the file, and import the file again.' : ''),
   };
+}
+
+/** "rbwHz: the file says ..." begins with the name of a tag in the interface; people call it something else. */
+function inWords(detail: string): string {
+  return capital(detail.replace(/^(\w+)(?=: )/, (name) => tagWords(name as TagName)));
+}
+
+function capital(text: string): string {
+  return text.charAt(0).toUpperCase() + text.slice(1);
 }
 
 /** Whether the way out is to say which unit a file is written in: only its texts tell, the code is the same for every fault. */

@@ -1,29 +1,12 @@
 import '../ui/zod-without-eval';
 import { SweepTags } from '@shared/contracts/sweeps';
-
-export type TagName = keyof SweepTags;
+import { type TagName, tagWords } from './tag-words';
 
 /** A tag that keeps a trace from being imported. */
 export interface Gap {
   readonly tag: TagName;
   /** What is wrong with what is there; empty when nothing is there. */
   readonly fault: string;
-}
-
-const TAG_WORDS: Partial<Record<TagName, string>> = {
-  hardware: 'hardware revision',
-  firmware: 'firmware revision',
-  state: 'operating state',
-  unit: 'unit',
-  takenAt: 'time of the measurement',
-  rbwHz: 'resolution bandwidth',
-  attenuationDb: 'attenuation',
-  switching: 'switching stages',
-};
-
-/** What people call a tag. */
-export function tagWords(tag: TagName): string {
-  return TAG_WORDS[tag] ?? tag;
 }
 
 /** What a set of tags lacks, and what in it does not fit, by the rule that the server checks it with. */

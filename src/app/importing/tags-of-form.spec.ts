@@ -59,7 +59,14 @@ describe('fillFromLast', () => {
   it('fills the set-up of the last sweep in', () => {
     const form = tagsForm();
     fillFromLast(form, last);
-    expect(tagsOfForm(form.getRawValue(), 'UTC')).toEqual(last);
+    const { line: _line, detector: _detector, kind: _kind, ...setUp } = last;
+    expect(tagsOfForm(form.getRawValue(), 'UTC')).toEqual({ ...setUp, kind: 'product' });
+  });
+
+  it('does not make the next product a background because the last sweep was one', () => {
+    const form = tagsForm();
+    fillFromLast(form, { ...last, kind: 'background' });
+    expect(form.getRawValue()).toMatchObject({ kind: 'product', line: '', detector: '' });
   });
 
   it('keeps what the person typed, and fills what they emptied', () => {

@@ -33,20 +33,27 @@ export function tagsOfForm(content: TagsFormContent, timeZone: string): BatchTag
 }
 
 /**
- * Fills the form with the tags of the last sweep; what the person typed into it stays.
+ * Fills the form with the set-up of the last sweep; what the person typed into it stays. Line, detector and kind are left
+ * alone: they belong to that one trace, and taken over unseen they would mislabel all others.
  * @returns names of the fields that were filled
  */
 export function fillFromLast(form: TagsForm, last: BatchTags): string[] {
-  const { rbwHz, attenuationDb, ...same } = last;
+  const { product, hardware, firmware, unit, state, bench, rbwHz, attenuationDb, corrected } = last;
   const wanted: Record<string, unknown> = withoutGaps({
-    ...same,
+    product,
+    hardware,
+    firmware,
+    unit,
+    state,
+    bench,
+    corrected,
     rbwKhz: rbwHz === undefined ? undefined : rbwHz / 1e3,
     attenuationDb,
   });
   const filled = Object.entries(wanted).filter(([name]) => {
     const control = form.get(name);
     const isTyped = control?.dirty && control.value !== '' && control.value !== null;
-    return control !== null && name !== 'switching' && !isTyped;
+    return control !== null && !isTyped;
   });
   form.patchValue(Object.fromEntries(filled));
   return filled.map(([name]) => name);

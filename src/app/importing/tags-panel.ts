@@ -14,6 +14,7 @@ import { FieldErrorPipe } from '../ui/field-error';
 import type { DraftFile } from './draft-file';
 import { ImportApi } from './import-api';
 import { StagesEditor } from './stages-editor';
+import { noteOnSetting } from './note-on-setting';
 import { SuggestField } from './suggest-field';
 import { TagCatalogue } from './tag-catalogue';
 import { stageGroup, TagsForm, TagsFormContent } from './tags-form';
@@ -78,13 +79,14 @@ export class TagsPanel {
   });
 
   protected readonly rbwNote = computed(() => {
+    const { rbwKhz } = this.content();
     const stated = distinct(this.files().map(({ reading }) => reading?.rbwHz ?? null));
-    return stated.length > 0 ? `In the files: ${stated.map(formatFrequency).join(', ')}` : 'Empty: not known';
+    return noteOnSetting(rbwKhz === null ? null : rbwKhz * 1e3, stated, formatFrequency);
   });
 
   protected readonly attenuationNote = computed(() => {
     const stated = distinct(this.files().map(({ reading }) => reading?.attenuationDb ?? null));
-    return stated.length > 0 ? `In the files: ${stated.join(', ')} dB` : 'Empty: not known';
+    return noteOnSetting(this.content().attenuationDb, stated, (attenuationDb) => `${attenuationDb} dB`);
   });
 
   /** The build whose stages may be taken over: the one being measured, or else the one before. */
