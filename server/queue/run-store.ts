@@ -27,9 +27,9 @@ export function findRunByOnceKey(db: Database, onceKey: string): JobRun | undefi
   return db.select().from(jobRuns).where(eq(jobRuns.onceKey, onceKey)).get();
 }
 
-/** The newest run with this lock in whatever state. */
-export function findLatestRun(db: Database, lockKey: string): JobRun | undefined {
-  return db.select().from(jobRuns).where(eq(jobRuns.lockKey, lockKey)).orderBy(desc(jobRuns.id)).limit(1).get();
+/** The newest runs with this lock in whatever state, newest first. */
+export function listLatestRuns(db: Database, lockKey: string, limit: number): JobRun[] {
+  return db.select().from(jobRuns).where(eq(jobRuns.lockKey, lockKey)).orderBy(desc(jobRuns.id)).limit(limit).all();
 }
 
 /** The oldest waiting run whose lock nobody holds. */
