@@ -18,6 +18,7 @@ import { guardCrossSite } from './http/cross-site';
 import { handleErrors } from './http/handle-errors';
 import { healthRoutes } from './http/health-routes';
 import { identify } from './http/identify';
+import { loggableUrl } from './http/loggable-url';
 import { openapiRoutes } from './http/openapi-routes';
 import { SESSION_MS, SessionStore } from './http/session-store';
 import { judgingRoutes } from './judging/judging-routes';
@@ -60,7 +61,13 @@ export function createApp(context: Context): Express {
   const app = express();
   app.disable('x-powered-by');
   app.set('trust proxy', context.config.trustedProxies);
-  app.use(pinoHttp({ logger: context.log, autoLogging: { ignore: (request) => !request.url?.startsWith('/api/') } }));
+  app.use(
+    pinoHttp({
+      logger: context.log,
+      autoLogging: { ignore: (request) => !request.url?.startsWith('/api/') },
+      serializers: { req: describeRequest, res: describeResponse },
+    }),
+  );
   app.use(
     helmet({
       contentSecurityPolicy: { directives: contentPolicy() },
@@ -74,7 +81,7 @@ export function createApp(context: Context): Express {
     }),
   );
 
-  app.use('/api', healthRoutes(context), unsubscribeRoutes(context), express.json({ limit: '256kb' }));
+  app.use('/api', keepToTheCaller, healthRoutes(context), unsubscribeRoutes(context), express.json({ limit: '256kb' }));
   app.use('/api', sessionOf(context), passport.session() as express.RequestHandler, identify(context), guardCrossSite);
   for (const routes of FEATURES) app.use('/api', routes(context));
   app.use('/api', (request) => {
@@ -85,6 +92,21 @@ export function createApp(context: Context): Express {
   app.use(handleErrors(context.log));
   return app;
 }
+
+/** What the log says of a request: no header, query or path that may hold a secret. */
+function describeRequest({ id, method, url }: { id: unknown; method: string; url: string }) {
+  return { id, method, url: loggableUrl(url) };
+}
+
+function describeResponse({ statusCode }: { statusCode: number }) {
+  return { statusCode };
+}
+
+/** Answers differ from caller to caller and moment to moment: nobody in between keeps them, and the browser asks again. */
+const keepToTheCaller: express.RequestHandler = (_request, response, next) => {
+  response.set('cache-control', 'private, no-cache');
+  next();
+};
 
 function sessionOf(context: Context): express.RequestHandler {
   return session({

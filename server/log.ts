@@ -3,16 +3,7 @@ import type { Config } from './config/read-config';
 
 export type { Logger };
 
-/** The process's logger; secrets in headers never reach it. */
+/** The process's logger. */
 export function createLog(config: Pick<Config, 'logLevel'>, name: string): Logger {
-  return pino({
-    name,
-    level: config.logLevel,
-    redact: [
-      'req.headers.cookie',
-      'req.headers.authorization',
-      'req.headers["x-xsrf-token"]',
-      'res.headers["set-cookie"]',
-    ],
-  });
+  return pino({ name, level: config.logLevel });
 }

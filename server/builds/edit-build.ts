@@ -45,6 +45,7 @@ export function createBuild(context: Context, actor: Actor, product: Product, in
 export function editBuild(context: Context, actor: Actor, product: Product, buildId: number, patch: Patch): Build {
   return withTransaction(context.db, () => {
     const { build: before, hardware, firmware } = findBuild(context, product.id, buildId);
+    if (Object.keys(patch).length === 0) return before;
     const build = applyPatch(context, product, before, patch);
     recordAudit(context, actor, {
       teamId: product.teamId,

@@ -21,7 +21,7 @@ export function problemOf(error: unknown): Problem {
       ? problem('tooLarge', 'the file is larger than this installation reads')
       : problem('invalid', `upload: ${error.message}${error.field ? ` (${error.field})` : ''}`);
   }
-  const code = bodyParserCode(error);
+  const code = codeOfStatus(error);
   return code
     ? problem(code, (error as Error).message)
     : problem('internal', 'the fault is on our side; nothing was stored. It has been logged');
@@ -31,11 +31,17 @@ function problem(code: ProblemCode, detail: string, place: ProblemPlace = {}): P
   return { type: `/problems/${code}`, ...PROBLEM_STATUS[code], detail, ...place };
 }
 
-/** Errors of express's body readers and csrf-sync carry their status; anything else is ours. */
-function bodyParserCode(error: unknown): ProblemCode | undefined {
-  if (!(error instanceof Error) || !('status' in error)) return undefined;
-  if (error.status === 400) return 'invalid';
-  if (error.status === 403) return 'forbidden';
-  if (error.status === 413) return 'tooLarge';
-  return undefined;
+/** Statuses of express's body readers, its file sender and csrf-sync whose messages may be shown. */
+const SHOWN: Record<number, ProblemCode> = {
+  400: 'invalid',
+  403: 'forbidden',
+  413: 'tooLarge',
+  415: 'invalid',
+  416: 'invalid',
+};
+
+/** What is refused before a route sees it carries its status; anything else is ours. */
+function codeOfStatus(error: unknown): ProblemCode | undefined {
+  const isRefusal = error instanceof Error && 'status' in error && typeof error.status === 'number';
+  return isRefusal ? SHOWN[error.status as number] : undefined;
 }

@@ -3,8 +3,13 @@ import { type SessionData, Store } from 'express-session';
 import type { Database } from '../db/open-database';
 import { sessions } from '../db/schema';
 
+const HOUR_MS = 3600_000;
 /** How long a session lives after the last request. */
-export const SESSION_MS = 7 * 24 * 3600_000;
+export const SESSION_MS = 7 * 24 * HOUR_MS;
+/** How long one of somebody not signed in does, which only holds the token against cross-site requests. */
+const VISIT_MS = 24 * HOUR_MS;
+/** The life of a session is written again only once so much of it is gone: reading pages then writes nothing. */
+const TOUCH_STEP_MS = HOUR_MS;
 
 /** Passport keeps the signed-in person's id in the session under `passport.user`. */
 interface SignedInSession extends SessionData {
@@ -30,7 +35,7 @@ export class SessionStore extends Store {
     const row = {
       data: JSON.stringify(session),
       personId: session.passport?.user ?? null,
-      expiresAt: this.now() + SESSION_MS,
+      expiresAt: this.expiryOf(session),
     };
     this.db
       .insert(sessions)
@@ -40,13 +45,16 @@ export class SessionStore extends Store {
     done?.();
   }
 
-  override touch(sid: string, _session: SessionData, done?: () => void): void {
-    this.db
-      .update(sessions)
-      .set({ expiresAt: this.now() + SESSION_MS })
-      .where(eq(sessions.sid, sid))
-      .run();
+  override touch(sid: string, session: SignedInSession, done?: () => void): void {
+    const expiresAt = this.expiryOf(session);
+    const row = this.db.select({ at: sessions.expiresAt }).from(sessions).where(eq(sessions.sid, sid)).get();
+    if (row !== undefined && row.at < expiresAt - TOUCH_STEP_MS)
+      this.db.update(sessions).set({ expiresAt }).where(eq(sessions.sid, sid)).run();
     done?.();
+  }
+
+  private expiryOf({ passport }: SignedInSession): number {
+    return this.now() + (passport?.user === undefined ? VISIT_MS : SESSION_MS);
   }
 
   override destroy(sid: string, done?: (error?: unknown) => void): void {

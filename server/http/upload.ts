@@ -9,22 +9,43 @@ const MOST_FILES = 2000;
 /** The plan of a full batch. */
 const MOST_FIELD_BYTES = 4 * 1024 * 1024;
 
+/** Longest file name of the common file systems. */
+const MOST_NAME_LENGTH = 255;
+
 /** Reads one file into memory. */
 export function uploadOne(context: Context, field: string): RequestHandler {
-  return multer({
-    storage: multer.memoryStorage(),
-    limits: { fileSize: context.config.maxUploadBytes, files: 1, fields: 4, fieldSize: MOST_FIELD_BYTES },
-    defParamCharset: 'utf8',
-  }).single(field);
+  return orInvalid(form(context, multer.memoryStorage(), 1).single(field));
 }
 
 /** Keeps each file as an original as soon as it is there, so that memory holds one at a time. */
 export function uploadMany(context: Context, field: string): RequestHandler {
+  return orInvalid(form(context, intoOriginals(context.originals), MOST_FILES).array(field, MOST_FILES));
+}
+
+function form(context: Context, storage: multer.StorageEngine, files: number): multer.Multer {
   return multer({
-    storage: intoOriginals(context.originals),
-    limits: { fileSize: context.config.maxUploadBytes, files: MOST_FILES, fields: 4, fieldSize: MOST_FIELD_BYTES },
+    storage,
+    limits: { fileSize: context.config.maxUploadBytes, files, fields: 4, fieldSize: MOST_FIELD_BYTES },
     defParamCharset: 'utf8',
-  }).array(field, MOST_FILES);
+    fileFilter: (_request, file, done) => {
+      file.originalname = plainName(file.originalname);
+      done(null, true);
+    },
+  });
+}
+
+/** Without what cannot be seen: line breaks, and marks that make a name read as another. */
+function plainName(name: string): string {
+  return name.replace(/[\p{Cc}\p{Cf}]/gu, '').slice(0, MOST_NAME_LENGTH) || 'unnamed';
+}
+
+/** A form that breaks off or is none is the sender's fault; faults of disk and database carry a code and stay ours. */
+function orInvalid(read: RequestHandler): RequestHandler {
+  return (request, response, next) =>
+    read(request, response, (error?: unknown) => {
+      const isForm = error instanceof Error && error.name === 'Error' && !('code' in error);
+      next(isForm ? new ServiceError('invalid', `upload: ${error.message}`) : error);
+    });
 }
 
 /** The kept file's SHA-256 becomes its `filename`. One whose upload breaks off is never kept. */

@@ -45,6 +45,7 @@ export function editProduct(
   { product }: FoundProduct,
   patch: z.infer<typeof ProductPatch>,
 ): Product {
+  if (Object.keys(patch).length === 0) return product;
   const isOtherLimit = patch.limitSetKey !== undefined && patch.limitSetKey !== product.limitSetKey;
   if (patch.limitSetKey !== undefined) requireLimitSet(patch.limitSetKey);
   if (isOtherLimit && countSweeps(context.db, product.id) > 0) {

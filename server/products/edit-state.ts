@@ -32,6 +32,7 @@ export function editState(
     const before = listStates(context.db, product.id).find((state) => state.id === stateId);
     if (before === undefined)
       throw new ServiceError('notFound', `the product has no operating state number ${stateId}`);
+    if (Object.keys(values).length === 0) return before;
     if (values.name !== undefined && values.name !== before.name) requireFreeName(context, product, values.name);
     const state = updateState(context.db, stateId, values);
     audit(context, actor, product, state, 'changed', { before, now: values });

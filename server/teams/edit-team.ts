@@ -9,6 +9,7 @@ import { listProductIds, type Team, updateTeam } from './team-store';
 
 /** Changes a team's settings. Builds are judged again where the change bears on a verdict. */
 export function editTeam(context: Context, actor: Actor, team: Team, patch: TeamPatch): Team {
+  if (Object.keys(patch).length === 0) return team;
   return withTransaction(context.db, () => {
     const changed = updateTeam(context.db, team.id, patch);
     const isJudgedAnew = changed.thresholdDb !== team.thresholdDb || changed.targetMarginDb !== team.targetMarginDb;
