@@ -25,9 +25,22 @@ export async function workOnce(context: Context, worker: string, jobs: readonly 
     log.info('run finished');
   } catch (error) {
     log.error({ err: error }, 'run failed');
-    if (!(error instanceof RunLostError)) held.fail(error);
+    // What another worker holds by now is not this one's to end.
+    if (!(error instanceof RunLostError)) attempt(context, () => held.fail(error));
   }
   return true;
+}
+
+/**
+ * Does something with the database that may fail for a moment, locked or full: logged, and left to the next time, for a
+ * worker that dies of it takes the web server with it.
+ */
+function attempt(context: Context, work: () => void): void {
+  try {
+    work();
+  } catch (error) {
+    context.log.error({ err: error }, 'the worker could not write to the database');
+  }
 }
 
 /** Works until `signal` aborts; a run in hand is finished first. */
@@ -38,10 +51,14 @@ export async function startWorker(
   signal: AbortSignal,
 ): Promise<void> {
   const startedAt = context.now();
-  beat(context, worker, startedAt);
-  const pulse = setInterval(() => beat(context, worker, startedAt), BEAT_EVERY_MS);
+  const report = () => attempt(context, () => beat(context, worker, startedAt));
+  report();
+  const pulse = setInterval(report, BEAT_EVERY_MS);
   while (!signal.aborted) {
-    const hasWorked = await workOnce(context, worker, jobs);
+    const hasWorked = await workOnce(context, worker, jobs).catch((error: unknown) => {
+      context.log.error({ err: error }, 'the worker could not take a run');
+      return false;
+    });
     if (!hasWorked) await setTimeout(POLL_MS, undefined, { signal }).catch(() => undefined);
   }
   clearInterval(pulse);

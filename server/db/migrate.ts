@@ -10,11 +10,16 @@ const Journal = z.object({ entries: z.array(z.object({ when: z.number() })) });
 /**
  * Brings the database to the newest schema, then turns foreign keys on.
  *
- * @throws Error when rows break a foreign key afterwards
+ * @param folder of the migrations; a test gives its own
+ * @throws Error when the database is of a newer program, or rows break a foreign key afterwards
  */
-export function migrate(database: Database): void {
+export function migrate(database: Database, folder = MIGRATIONS): void {
   database.$client.pragma('foreign_keys = OFF');
-  runMigrations(database, { migrationsFolder: MIGRATIONS });
+  runMigrations(database, { migrationsFolder: folder });
+  if (newestMigration(folder) !== appliedMigration(database))
+    throw new Error(
+      'the database was migrated by a newer version of this program: start that one, or go back to a backup',
+    );
   const broken = database.$client.pragma('foreign_key_check') as unknown[];
   if (broken.length > 0)
     throw new Error(`the migration left ${broken.length} rows that point nowhere: ${JSON.stringify(broken[0])}`);
@@ -27,13 +32,14 @@ export function migrate(database: Database): void {
  * @throws Error when the schema is older or newer than this program's
  */
 export function requireCurrentSchema(database: Database): void {
-  const newest = Journal.parse(JSON.parse(readFileSync(resolve(MIGRATIONS, 'meta/_journal.json'), 'utf8'))).entries.at(
-    -1,
-  )?.when;
-  if (newest !== appliedMigration(database)) {
+  if (newestMigration(MIGRATIONS) !== appliedMigration(database)) {
     throw new Error('the database does not have the schema of this program: start the web server first, it migrates');
   }
   database.$client.pragma('foreign_keys = ON');
+}
+
+function newestMigration(folder: string): number | undefined {
+  return Journal.parse(JSON.parse(readFileSync(resolve(folder, 'meta/_journal.json'), 'utf8'))).entries.at(-1)?.when;
 }
 
 function appliedMigration(database: Database): number | undefined {

@@ -6,7 +6,13 @@ import * as z from 'zod';
 export const Key = z
   .string()
   .regex(/^[a-z0-9][a-z0-9-]{0,62}$/, 'use lower-case letters, digits and hyphens, starting with a letter or digit');
-export const Name = z.string().trim().min(1, 'must not be empty').max(120);
+/** One line of text that people see: no line break, tab or other control character, which mails and reports would trip over. */
+export const Name = z
+  .string()
+  .trim()
+  .min(1, 'must not be empty')
+  .max(120)
+  .regex(/^\P{Cc}*$/u, 'must be one line without control characters');
 export const Notes = z.string().max(4000);
 export const Email = z.string().trim().toLowerCase().pipe(z.email());
 export const Password = z.string().min(12, 'use at least 12 characters').max(200);

@@ -14,7 +14,7 @@ export const SweepTags = z
     product: z.string().min(1),
     hardware: Name,
     firmware: Name,
-    unit: z.string().trim().min(1).max(120).optional(),
+    unit: Name.optional(),
     state: Name,
     bench: z.string().min(1),
     line: Line,
@@ -28,7 +28,7 @@ export const SweepTags = z
       .max(100)
       .optional()
       .describe('set at the receiver, already part of its reading'),
-    run: z.string().trim().min(1).max(120).optional().describe('default: the day and bench'),
+    run: Name.optional().describe('default: the day and bench'),
     trace: z.int().min(1).max(64).default(1).describe('which level column, 1 first'),
     frequencyUnit: z.enum(FREQUENCY_UNITS).optional(),
     levelUnit: z.enum(LEVEL_UNITS).optional(),

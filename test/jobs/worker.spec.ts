@@ -8,12 +8,13 @@ import { builds, jobRuns, verdicts } from '../../server/db/schema';
 import { migrate, requireCurrentSchema } from '../../server/db/migrate';
 import { requestJudging } from '../../server/judging/request-judging';
 import { claimRun, LEASE_MS } from '../../server/queue/claim-run';
+import { enqueueRun } from '../../server/queue/enqueue-run';
 import { HeldRun, RunLostError } from '../../server/queue/held-run';
 import { judgeOneBuild } from '../../server/judging/judge-one-build';
 import type { Job } from '../../jobs/job';
 import { judgeJob } from '../../jobs/judge';
 import { startScheduler } from '../../jobs/scheduler';
-import { workOnce } from '../../jobs/worker';
+import { startWorker, workOnce } from '../../jobs/worker';
 import { buildLaboratory, dayOf, measureBuild, measureQuietBuilds, runJudging } from '../builders/bench-day';
 import { createTestContext, type TestContext } from '../support/test-context';
 import { TestClock } from '../support/test-clock';
@@ -237,5 +238,30 @@ describe('the scheduler', () => {
     startScheduler(context, [judgeJob])();
     startScheduler(context, [judgeJob])();
     expect(runsOf(context)).toHaveLength(1);
+  });
+});
+
+describe('a worker whose database is locked for longer than it waits', () => {
+  it('goes on when it can', async () => {
+    const dataDir = mkdtempSync(join(tmpdir(), 'strandline-worker-'));
+    const config = readConfig({ NODE_ENV: 'test', LOG_LEVEL: 'silent', STRANDLINE_DATA_DIR: dataDir });
+    const [context, other] = [createContext(config, 'worker'), createContext(config, 'other')];
+    const stopping = new AbortController();
+    try {
+      migrate(context.db);
+      context.db.$client.pragma('busy_timeout = 1');
+      other.db.$client.exec('begin immediate');
+      const done = new Promise<void>((resolve) => {
+        const job: Job = { name: 'prune', schedule: [], request: () => undefined, run: () => resolve() };
+        void startWorker(context, 'worker', [job], stopping.signal).then(() => context.close());
+      });
+      other.db.$client.exec('rollback');
+      enqueueRun(other, JOB, { job: 'prune', teamId: null, lockKey: 'prune', trigger: 'schedule' });
+      await done;
+    } finally {
+      stopping.abort();
+      other.close();
+      rmSync(dataDir, { recursive: true, force: true });
+    }
   });
 });
