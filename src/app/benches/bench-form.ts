@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, effect, inject, input, output } from '@angular/core';
+import { ChangeDetectionStrategy, Component, effect, inject, input, output, signal } from '@angular/core';
 import { NonNullableFormBuilder, ReactiveFormsModule, Validators } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { MatFormFieldModule } from '@angular/material/form-field';
@@ -43,6 +43,9 @@ export class BenchForm {
     notes: ['', Validators.maxLength(4000)],
   });
 
+  /** Fields that say themselves what the server has against them. */
+  protected readonly shownPaths = signal<readonly string[]>([]);
+
   constructor() {
     effect(() => {
       const bench = this.bench();
@@ -50,7 +53,7 @@ export class BenchForm {
     });
     effect(() => {
       const problem = this.problem();
-      if (problem) applyProblem(this.form, problem);
+      this.shownPaths.set(problem ? applyProblem(this.form, namingItsField(problem)) : []);
     });
   }
 
@@ -67,4 +70,12 @@ export class BenchForm {
     }
     this.saved.emit(this.form.getRawValue());
   }
+}
+
+/** A conflict over one field comes as "key: the team has a bench ..."; it belongs beside that field. */
+function namingItsField(problem: Problem): Problem {
+  const [, path, message] = /^(\w+): (.+)$/s.exec(problem.detail) ?? [];
+  return problem.errors || path === undefined || message === undefined
+    ? problem
+    : { ...problem, errors: [{ path, message }] };
 }

@@ -62,7 +62,7 @@ describe('BenchesPage', () => {
     expect(element.querySelectorAll('button')).toHaveLength(0);
   });
 
-  it('keeps what was typed when the server refuses a new bench, with the reason at the top', async () => {
+  it('keeps what was typed when the server refuses a new bench, with the reason beside the field', async () => {
     const { fixture, http, element, press, type } = await open(true);
     await press('Add a bench');
     await type('name', 'Bench 1');
@@ -74,7 +74,8 @@ describe('BenchesPage', () => {
       { status: 409, statusText: 'Conflict' },
     );
     await fixture.whenStable();
-    expect(element.textContent).toContain('the team has a bench "bench-1" already');
+    expect(element.querySelector('mat-error')?.textContent).toContain('The team has a bench "bench-1" already');
+    expect(element.querySelector('app-problem-banner')).toBeNull();
     expect(element.querySelector<HTMLInputElement>('[formcontrolname="name"]')?.value).toBe('Bench 1');
   });
 

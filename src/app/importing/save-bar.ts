@@ -93,7 +93,8 @@ export class SaveBar {
 
   protected readonly count = computed(() => {
     const planned = this.planned();
-    if (this.reading() > 0) return `Reading ${this.reading()} of ${this.files().length} files`;
+    const { length } = this.files();
+    if (this.reading() > 0) return `Reading: ${length - this.reading()} of ${length} files`;
     if (planned.length === 0) return 'No trace to save';
     return `${counted(planned.length, 'sweep')} from ${counted(new Set(planned.map(({ fileId }) => fileId)).size, 'file')}`;
   });
