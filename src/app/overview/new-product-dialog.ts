@@ -32,6 +32,11 @@ import { keyFromName } from './key-from-name';
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './new-product-dialog.html',
+  styles: `
+    .form {
+      padding-top: 6px;
+    }
+  `,
 })
 export class NewProductDialog {
   private readonly http = inject(HttpClient);

@@ -29,7 +29,7 @@ export class NothingMeasured {
   /** The series that were asked for, in words. */
   readonly words = input.required<string>();
 
-  protected readonly hasSweeps = computed(() => (this.view.product()?.lines.length ?? 0) > 0);
+  protected readonly hasSweeps = computed(() => this.view.isMeasured() ?? false);
   protected readonly heading = computed(() => (this.hasSweeps() ? 'Not measured in this series' : 'Not measured yet'));
   protected readonly text = computed(() =>
     this.hasSweeps()

@@ -38,6 +38,11 @@ export class ProductInView {
   readonly product = keptValue(this.productAnswer);
   /** Oldest first. */
   readonly builds = keptValue(this.buildsAnswer);
+  /** Whether there is any sweep to draw; undefined before the product is known. */
+  readonly isMeasured = computed(() => {
+    const product = this.product();
+    return product && product.lines.length > 0;
+  });
   readonly productProblem = problemOfResource(this.productAnswer);
   readonly buildsProblem = problemOfResource(this.buildsAnswer);
 

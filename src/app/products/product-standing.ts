@@ -25,5 +25,11 @@ export class ProductStanding {
   protected readonly limitTitle = computed(
     () => findLimitSet(this.product().limitSetKey)?.title ?? this.product().limitSetKey,
   );
+  /** Where nobody measured the latest build, the last one that was. */
+  protected readonly lastMeasured = computed(() => {
+    const latest = this.product().latestBuild;
+    if (!latest || latest.worstMarginDb !== null) return undefined;
+    return this.view.builds()?.findLast(({ worstMarginDb }) => worstMarginDb !== null);
+  });
   protected readonly isOver = computed(() => (this.product().latestBuild?.worstMarginDb ?? 0) < 0);
 }

@@ -61,7 +61,7 @@ export class SeriesFilter {
     const closest = this.closest();
     if (!closest) return `All ${names}`;
     const name = { states: closest.state, lines: closest.line, detectors: closest.detector }[names];
-    return name === undefined ? 'closest to the limit' : `closest: ${name}`;
+    return name === undefined ? 'closest' : `closest: ${name}`;
   }
 
   protected choose(part: { state?: string | null; line?: string | null; detector?: string | null }): void {

@@ -47,6 +47,9 @@ export class BuildDialog {
   protected readonly timeZone = inject(TEAM_TIME_ZONE)();
   protected readonly data = inject<BuildDialogData>(MAT_DIALOG_DATA);
 
+  protected readonly title = this.data.build
+    ? `Change build ${this.data.build.hardware} / ${this.data.build.firmware}`
+    : 'Add a build';
   private readonly parts = buildForm(this.data.build, Date.now(), this.timeZone);
   protected readonly form = this.parts.form;
   protected readonly busy = signal(false);

@@ -21,8 +21,8 @@ import { ProductInView } from '../product-in-view';
             <th scope="col" class="wide-only">Band</th>
             <th scope="col" class="number wide-only">Change</th>
             <th scope="col" class="number">Margin left</th>
-            <th scope="col">State</th>
-            <th scope="col">Owner</th>
+            <th scope="col" class="wide-only">State</th>
+            <th scope="col" class="wide-only">Owner</th>
           </tr>
         </thead>
         <tbody>
@@ -34,7 +34,10 @@ import { ProductInView } from '../product-in-view';
                 } @else {
                   <a [routerLink]="['/t', view.team(), 'drops', drop.id]">{{ drop.sentence }}</a>
                 }
-                <span class="narrow-only small muted">{{ drop.operatingState }}, {{ drop.band }}</span>
+                <span class="narrow-only small muted"
+                  >{{ drop.operatingState }}, {{ drop.band }}; {{ words[drop.state] }},
+                  {{ drop.owner?.name ?? 'nobody yet' }}</span
+                >
               </td>
               <td class="wide-only">{{ drop.operatingState }}</td>
               <td class="wide-only">{{ drop.band }}</td>
@@ -42,8 +45,8 @@ import { ProductInView } from '../product-in-view';
               <td class="number">
                 <app-margin-value [marginDb]="drop.marginDb" [targetMarginDb]="targetMarginDb()" />
               </td>
-              <td>{{ words[drop.state] }}</td>
-              <td>{{ drop.owner?.name ?? 'nobody yet' }}</td>
+              <td class="wide-only">{{ words[drop.state] }}</td>
+              <td class="wide-only">{{ drop.owner?.name ?? 'nobody yet' }}</td>
             </tr>
           }
         </tbody>

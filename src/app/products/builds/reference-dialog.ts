@@ -34,13 +34,7 @@ export interface ReferenceDialogData {
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <form [formGroup]="form" (ngSubmit)="choose()">
-      <h2 mat-dialog-title>
-        {{
-          data.build
-            ? 'Compare with ' + data.build.hardware + ' / ' + data.build.firmware
-            : 'Compare with builds judged held'
-        }}
-      </h2>
+      <h2 mat-dialog-title>{{ title }}</h2>
       <mat-dialog-content
         ><div class="form">
           @if (problem(); as problem) {
@@ -75,12 +69,20 @@ export interface ReferenceDialogData {
       </mat-dialog-actions>
     </form>
   `,
+  styles: `
+    .form {
+      padding-top: 6px;
+    }
+  `,
 })
 export class ReferenceDialog {
   private readonly http = inject(HttpClient);
   private readonly dialog = inject<MatDialogRef<ReferenceDialog, true>>(MatDialogRef);
   protected readonly data = inject<ReferenceDialogData>(MAT_DIALOG_DATA);
 
+  protected readonly title = this.data.build
+    ? `Compare with ${this.data.build.hardware} / ${this.data.build.firmware}`
+    : 'Compare with builds judged held';
   protected readonly form = inject(NonNullableFormBuilder).group({
     reason: ['', [Validators.required, Validators.minLength(3), Validators.maxLength(400)]],
   });

@@ -59,9 +59,10 @@ const MOST_OPTIONS = 40;
     }
     .option {
       display: grid;
-      grid-template-columns: 1fr auto 84px;
+      grid-template-columns: minmax(140px, auto) 96px 92px;
       gap: 12px;
       align-items: baseline;
+      font-size: 13px;
     }
     .option > :last-child {
       text-align: end;

@@ -15,6 +15,7 @@ import { ProblemBanner } from '../../ui/problem-banner';
 import { Skeleton } from '../../ui/skeleton';
 import { AddressQuery } from '../address-query';
 import { keptValue } from '../kept-value';
+import { NothingMeasured } from '../nothing-measured';
 import { problemOfResource } from '../problem-of-resource';
 import { ProductInView } from '../product-in-view';
 import { seriesChoice, seriesWords } from '../series-choice';
@@ -38,6 +39,7 @@ import { problemOfFrames } from './problem-of-frames';
     MatCheckbox,
     MatFormFieldModule,
     MatSelectModule,
+    NothingMeasured,
     OverlaySweeps,
     ProblemBanner,
     SeriesFilter,

@@ -36,6 +36,11 @@ export interface StateDialogData {
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './state-dialog.html',
+  styles: `
+    .form {
+      padding-top: 6px;
+    }
+  `,
 })
 export class StateDialog {
   private readonly http = inject(HttpClient);
