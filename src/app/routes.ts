@@ -13,6 +13,11 @@ export const routes: Routes = [
     loadChildren: () => import('./mailbox/mailbox-routes').then((m) => m.mailboxRoutes),
   },
   {
+    path: 'unsubscribe/:secret',
+    title: 'Weekly digest',
+    loadComponent: () => import('./digests/unsubscribe-page').then((m) => m.UnsubscribePage),
+  },
+  {
     path: '',
     loadComponent: () => import('./shell/shell').then((m) => m.Shell),
     canActivate: [signedInOnly],

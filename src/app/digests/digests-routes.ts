@@ -1,3 +1,9 @@
 import { Routes } from '@angular/router';
 
-export const digestsRoutes: Routes = [];
+export const digestsRoutes: Routes = [
+  {
+    path: '',
+    title: 'Digest',
+    loadComponent: () => import('./digest-page').then((m) => m.DigestPage),
+  },
+];

@@ -1,7 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, output, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { MatFormFieldModule } from '@angular/material/form-field';
-import { MatSelectModule } from '@angular/material/select';
+import { MatSelectChange, MatSelectModule } from '@angular/material/select';
 import type { DropView } from '@shared/contracts/drops';
 import type { Problem } from '@shared/contracts/problem';
 import { SessionStore } from '../session/session-store';
@@ -18,11 +18,7 @@ import { DropTriage } from './drop-triage';
     <div class="row">
       <mat-form-field>
         <mat-label>Owner</mat-label>
-        <mat-select
-          [value]="drop().owner?.id ?? 0"
-          [disabled]="busy()"
-          (selectionChange)="assign($event.value || null)"
-        >
+        <mat-select [value]="drop().owner?.id ?? 0" [disabled]="busy()" (selectionChange)="choose($event)">
           <mat-option [value]="0">nobody</mat-option>
           @for (person of people(); track person.id) {
             <mat-option [value]="person.id">{{ person.name }}</mat-option>
@@ -71,6 +67,12 @@ export class OwnerChoice {
     const { owner, assignable } = this.drop();
     return me !== owner?.id && assignable.some(({ id }) => id === me) ? me : undefined;
   });
+
+  /** The field keeps showing what the server has; its answer moves it. */
+  protected choose({ source, value }: MatSelectChange<number>): void {
+    source.value = this.drop().owner?.id ?? 0;
+    this.assign(value || null);
+  }
 
   protected assign(personId: number | null): void {
     this.busy.set(true);
