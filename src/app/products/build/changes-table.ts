@@ -62,6 +62,9 @@ export interface ComparedBuild {
     th[scope='row'] {
       vertical-align: top;
     }
+    thead a {
+      text-decoration: underline;
+    }
     td.wrap {
       min-width: 150px;
       vertical-align: top;

@@ -17,18 +17,20 @@ const MOST_OPTIONS = 40;
   template: `
     <mat-form-field>
       <mat-label>Builds</mat-label>
-      <mat-chip-grid #grid aria-label="Builds in the picture">
-        @for (build of chosen(); track build.id) {
-          <mat-chip-row (removed)="remove(build)">
-            @if (build.isReference) {
-              <mat-icon matChipAvatar svgIcon="reference" aria-label="reference" />
-            }
-            {{ build.hardware }} / {{ build.firmware }}
-            <button matChipRemove type="button" [attr.aria-label]="'Take ' + build.firmware + ' out'">
-              <mat-icon svgIcon="close" />
-            </button>
-          </mat-chip-row>
-        }
+      <div class="row">
+        <mat-chip-grid #grid aria-label="Builds in the picture">
+          @for (build of chosen(); track build.id) {
+            <mat-chip-row (removed)="remove(build)">
+              @if (build.isReference) {
+                <mat-icon matChipAvatar svgIcon="reference" aria-label="reference" />
+              }
+              {{ build.hardware }} / {{ build.firmware }}
+              <button matChipRemove type="button" [attr.aria-label]="'Take ' + build.firmware + ' out'">
+                <mat-icon svgIcon="close" />
+              </button>
+            </mat-chip-row>
+          }
+        </mat-chip-grid>
         <input
           #field
           placeholder="Add a build"
@@ -36,7 +38,7 @@ const MOST_OPTIONS = 40;
           [matAutocomplete]="list"
           (input)="typed.set(field.value)"
         />
-      </mat-chip-grid>
+      </div>
       <mat-autocomplete #list (optionSelected)="add($event, field)">
         @for (build of options(); track build.id) {
           <mat-option [value]="build.id">
@@ -56,6 +58,19 @@ const MOST_OPTIONS = 40;
     :host {
       display: block;
       min-width: 0;
+    }
+    .row {
+      display: flex;
+      flex-wrap: wrap;
+      gap: 4px 8px;
+      align-items: center;
+    }
+    .row mat-chip-grid {
+      flex: 0 1 auto;
+    }
+    .row input {
+      flex: 1 1 120px;
+      margin: 0;
     }
     .option {
       display: grid;
