@@ -104,12 +104,14 @@ export function latestReferenceChoice(db: Database, productId: number) {
     .get();
 }
 
-/** Changes of margin and worst margins of a build's judged bands. */
+/** Changes of margin and worst margins of a build's judged bands, read without the judgements themselves. */
 export function listChanges(db: Database, buildId: number) {
+  const { stateId, line, detector, band, verdict, differenceDb, worstMarginDb: worst } = verdicts;
   return db
-    .select({ verdict: verdicts.verdict, differenceDb: verdicts.differenceDb, marginDb: verdicts.worstMarginDb })
+    .select({ stateId, line, detector, band, verdict, differenceDb, worst })
     .from(verdicts)
     .where(eq(verdicts.buildId, buildId))
+    .orderBy(asc(verdicts.id))
     .all();
 }
 
