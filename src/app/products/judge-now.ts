@@ -5,13 +5,12 @@ import { MatButton } from '@angular/material/button';
 import { MatIcon } from '@angular/material/icon';
 import type { JobRunView } from '@shared/contracts/job-runs';
 import type { Problem } from '@shared/contracts/problem';
-import { exhaustMap, map, Observable, switchMap, takeWhile, timer } from 'rxjs';
+import { map, switchMap } from 'rxjs';
+import { followRun } from '../ui/follow-run';
 import { problemOf } from '../ui/problem';
 import { ProgressLine } from '../ui/progress-line';
 import { runWords } from './run-words';
 import { ProductInView } from './product-in-view';
-
-const POLL_MS = 1000;
 
 /** Lets a lead have the product judged at once and shows how far the run is; the run goes on when the page is left. */
 @Component({
@@ -81,7 +80,7 @@ export class JudgeNow {
       .post<{ runs: JobRunView[] }>(`/api/teams/${this.view.owner()}/judge`, { product: this.view.key() })
       .pipe(
         map(({ runs }) => runs[0].id),
-        switchMap((id) => this.follow(id)),
+        switchMap((id) => followRun(this.http, id)),
         takeUntilDestroyed(this.destroyed),
       )
       .subscribe({
@@ -95,12 +94,5 @@ export class JudgeNow {
           this.finished.emit();
         },
       });
-  }
-
-  private follow(id: number): Observable<JobRunView> {
-    return timer(0, POLL_MS).pipe(
-      exhaustMap(() => this.http.get<JobRunView>(`/api/v1/runs/${id}`)),
-      takeWhile(({ status }) => status === 'waiting' || status === 'running', true),
-    );
   }
 }

@@ -52,9 +52,6 @@ export interface ComparedBuild {
     <p class="small muted">What differs is set in bold. Declared by the team with the builds, not measured.</p>
   `,
   styles: `
-    .table-frame {
-      position: relative;
-    }
     :host {
       display: grid;
       gap: 6px;

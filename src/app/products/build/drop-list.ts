@@ -54,9 +54,6 @@ import { ProductInView } from '../product-in-view';
     </div>
   `,
   styles: `
-    .table-frame {
-      position: relative;
-    }
     :host {
       display: block;
       min-width: 0;

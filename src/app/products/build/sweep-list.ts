@@ -66,7 +66,6 @@ const FIRST_ROWS = 12;
       justify-items: start;
     }
     .table-frame {
-      position: relative;
       width: 100%;
     }
   `,

@@ -54,7 +54,6 @@ import { switchingChanges } from './switching-changes';
       gap: 8px;
     }
     .table-frame {
-      position: relative;
       max-width: 720px;
     }
   `,
