@@ -11,7 +11,7 @@ const three = aReading([
 describe('alikeTraces', () => {
   it('points at traces of a file that would be saved as the same thing', () => {
     expect(alikeTraces(plannedTraces([aFile({ reading: three })], {}))).toEqual([
-      'Traces 1 and 3 are all L QP. Leave out what is not another run of the same.',
+      'Traces 1 and 3 are both L QP. Leave out what is not another run of the same.',
     ]);
   });
 

@@ -11,6 +11,6 @@ export function alikeTraces(planned: readonly PlannedTrace[]): string[] {
       const [{ tags }] = traces;
       const numbers = traces.map(({ index }) => index + 1);
       const named = `${numbers.slice(0, -1).join(', ')} and ${numbers.at(-1)}`;
-      return `Traces ${named} are all ${tags.line} ${tags.detector}. Leave out what is not another run of the same.`;
+      return `Traces ${named} are ${traces.length === 2 ? 'both' : 'all'} ${tags.line} ${tags.detector}. Leave out what is not another run of the same.`;
     });
 }

@@ -6,15 +6,14 @@ import { MatIcon } from '@angular/material/icon';
 import { RouterLink } from '@angular/router';
 import type { BuildView } from '@shared/contracts/builds';
 import type { JobRunView, JudgeStarted } from '@shared/contracts/job-runs';
-import { repeat, switchMap, takeWhile } from 'rxjs';
+import { switchMap } from 'rxjs';
 import { CurrentTeam } from '../session/current-team';
+import { followRun } from '../ui/follow-run';
 import { MarginValue } from '../ui/margin-value';
 import { problemOf } from '../ui/problem';
 import { ProgressLine } from '../ui/progress-line';
 import { VerdictChip } from '../ui/verdict-chip';
 import type { BatchBuild } from './batch-builds';
-
-const POLL_MS = 1000;
 
 /** A build that sweeps of a batch went into: where it stands, the way to it, and for leads its judgement at once. */
 @Component({
@@ -100,12 +99,7 @@ export class BatchBuildCard {
     this.http
       .post<JudgeStarted>(`/api/teams/${encodeURIComponent(this.team())}/judge`, { product: this.build().product })
       .pipe(
-        switchMap(({ runs: [{ id }] }) =>
-          this.http.get<JobRunView>(`/api/v1/runs/${id}`).pipe(
-            repeat({ delay: POLL_MS }),
-            takeWhile(({ status }) => status === 'waiting' || status === 'running', true),
-          ),
-        ),
+        switchMap(({ runs: [{ id }] }) => followRun(this.http, id)),
         takeUntilDestroyed(this.destroyed),
       )
       .subscribe({

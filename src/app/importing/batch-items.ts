@@ -51,6 +51,8 @@ const ROWS_AT_A_TIME = 200;
               <td>
                 @if (item.sweepId !== null) {
                   <a [routerLink]="['/t', team(), 'sweeps', item.sweepId]">No. {{ item.sweepId }}</a>
+                } @else if (item.status === 'imported' || item.status === 'duplicate') {
+                  <span class="muted">removed since</span>
                 }
               </td>
               <td class="number">

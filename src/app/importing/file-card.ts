@@ -1,5 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, input, linkedSignal, output } from '@angular/core';
-import { MatIconButton } from '@angular/material/button';
+import { MatButton, MatIconButton } from '@angular/material/button';
 import { MatIcon } from '@angular/material/icon';
 import type { BatchTags } from '@shared/contracts/imports';
 import { formatFrequency } from '@shared/units/format-frequency';
@@ -23,7 +23,17 @@ const OF_FILE: ReadonlySet<TagName> = new Set(['state', 'line', 'detector', 'tak
 /** One file on its way in: a line when folded, else what was recognised, its traces, and the spectrum of one of them. */
 @Component({
   selector: 'app-file-card',
-  imports: [FileChoices, MatIcon, MatIconButton, ReadingFacts, ReadingProblem, TracePreview, TraceRows, UnitsAsked],
+  imports: [
+    FileChoices,
+    MatButton,
+    MatIcon,
+    MatIconButton,
+    ReadingFacts,
+    ReadingProblem,
+    TracePreview,
+    TraceRows,
+    UnitsAsked,
+  ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './file-card.html',
   styleUrl: './file-card.scss',
@@ -51,6 +61,11 @@ export class FileCard {
     source: () => this.file().traces.length,
     computation: (count, before) => (before && before.value < count ? before.value : 0),
   });
+  /** The server did not look into the file: it may well be right, and can be read again. */
+  protected readonly isUnanswered = computed(() => {
+    const status = this.file().problem?.status;
+    return status !== undefined && (status === 0 || status === 429 || status >= 500);
+  });
   protected readonly asksForUnits = computed(() => {
     const { problem, units, reading } = this.file();
     if (units.frequencyUnit !== undefined || units.levelUnit !== undefined) return true;
@@ -76,6 +91,7 @@ export class FileCard {
   protected readonly standing = computed(() => {
     const { reading, problem } = this.file();
     const planned = this.planned();
+    if (this.isUnanswered()) return { word: 'not read yet', icon: 'refresh', look: 'open' } as const;
     if (problem && this.asksForUnits()) return { word: 'needs its units', icon: 'edit', look: 'open' } as const;
     if (problem) return { word: 'cannot be read', icon: 'error', look: 'bad' } as const;
     if (!reading) return { word: 'reading', icon: 'clock', look: 'quiet' } as const;

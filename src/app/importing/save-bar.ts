@@ -15,6 +15,7 @@ import { missingWords } from './tag-gaps';
     @if (isSaving() || reading() > 0) {
       <app-progress-line [label]="isSaving() ? 'Saving' : 'Reading files'" [doneFraction]="readFraction()" />
     }
+    <div class="refusal"><ng-content /></div>
     <div class="bar">
       <div class="words" role="status">
         <p class="count">{{ count() }}</p>
@@ -51,6 +52,10 @@ import { missingWords } from './tag-gaps';
       border-radius: 8px;
       background: var(--sl-surface);
       box-shadow: 0 -4px 16px color-mix(in srgb, var(--sl-ink) 12%, transparent);
+    }
+    .refusal {
+      max-height: 40vh;
+      overflow-y: auto;
     }
     .bar {
       display: flex;

@@ -24,8 +24,11 @@ const MOST_STAGES = 8;
           <input matInput formControlName="stage" placeholder="PFC" />
           <mat-error>{{ stage.controls.stage | fieldError }}</mat-error>
         </mat-form-field>
+        <button mat-icon-button type="button" [attr.aria-label]="'Remove stage ' + (place + 1)" (click)="remove(place)">
+          <mat-icon svgIcon="close" />
+        </button>
         <mat-form-field>
-          <mat-label>kHz</mat-label>
+          <mat-label>Frequency, kHz</mat-label>
           <input matInput type="number" step="any" formControlName="frequencyKhz" />
           <mat-error>{{ stage.controls.frequencyKhz | fieldError }}</mat-error>
         </mat-form-field>
@@ -34,9 +37,6 @@ const MOST_STAGES = 8;
           <input matInput type="number" step="any" formControlName="spreadPercent" />
           <mat-error>{{ stage.controls.spreadPercent | fieldError }}</mat-error>
         </mat-form-field>
-        <button mat-icon-button type="button" [attr.aria-label]="'Remove stage ' + (place + 1)" (click)="remove(place)">
-          <mat-icon svgIcon="close" />
-        </button>
       </div>
     }
     <div class="acts">
@@ -53,8 +53,12 @@ const MOST_STAGES = 8;
     }
     .stage {
       display: grid;
-      grid-template-columns: 1.2fr 1fr 1fr auto;
-      gap: 6px;
+      grid-template-columns: 1fr 1fr 40px;
+      gap: 8px;
+      align-items: start;
+    }
+    .stage > :first-child {
+      grid-column: 1 / 3;
     }
     .acts {
       display: flex;
