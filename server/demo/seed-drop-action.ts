@@ -13,7 +13,10 @@ export function seedDropAction(context: Context, product: Product, action: DropA
   const owner = demoActor(context, action.ownerEmail);
   const fixedBy =
     action.fixedBy && findBuildOf(context, product.id, action.fixedBy.hardware, action.fixedBy.firmware).build;
-  for (const drop of findDropsOfBuild(context, build.id)) {
+  const drops = findDropsOfBuild(context, build.id);
+  if (drops.length === 0)
+    throw new Error(`the demo scenario acts on a drop that ${action.build.firmware} does not have`);
+  for (const drop of drops) {
     if (action.band !== null && drop.band !== action.band) continue;
     assignDrop(context, owner, drop.id, owner.personId);
     if (action.becomes === 'new' || action.becomes === 'withdrawn') continue;

@@ -11,7 +11,7 @@ import { type FoundProduct, findProduct } from '../products/find-product';
 import { shareProduct } from '../products/share-product';
 import { importSweep } from '../sweeps/import-sweep';
 import { findTeam } from '../teams/find-team';
-import type { DemoBuild, DemoProduct, DemoScenario, DemoSession } from './scenario-types';
+import type { BuildName, DemoBuild, DemoProduct, DemoScenario, DemoSession } from './scenario-types';
 import { seedDropAction } from './seed-drop-action';
 import { demoActor, demoActorWith } from './seed-people';
 import { firmwareOf } from './simulate-condition';
@@ -60,11 +60,13 @@ export function seedProduct(
     });
   }
   for (const action of product.dropActions) {
-    const builtAt = product.builds.find((build) => isSame(build, action.build))?.builtAtMs ?? 0;
-    const earliest = builtAt + action.afterDays * DAY_MS;
+    const raisedOn = demoBuildOf(product, action.build);
     // "Fixed" must name a judged build that shows it.
-    const fixedBy = action.fixedBy && product.builds.find((build) => isSame(build, action.fixedBy ?? build));
-    const at = Math.max(earliest, fixedBy ? lastSweepAt(fixedBy) + 2 * JUDGED_AFTER_MS : 0);
+    const judged = [raisedOn, ...(action.fixedBy ? [demoBuildOf(product, action.fixedBy)] : [])];
+    const at = Math.max(
+      raisedOn.builtAtMs + action.afterDays * DAY_MS,
+      ...judged.map((build) => lastSweepAt(build) + 2 * JUDGED_AFTER_MS),
+    );
     happenings.push({ at, happen: (then) => seedDropAction(then, found(then).product, action) });
   }
 
@@ -115,8 +117,11 @@ function lastSweepAt(build: DemoBuild): number {
   return Math.max(build.builtAtMs, ...build.sessions.map(({ takenAtMs }) => takenAtMs));
 }
 
-function isSame(build: { hardware: string; firmware: string }, other: { hardware: string; firmware: string }): boolean {
-  return build.hardware === other.hardware && build.firmware === other.firmware;
+function demoBuildOf(product: DemoProduct, { hardware, firmware }: BuildName): DemoBuild {
+  const build = product.builds.find((one) => one.hardware === hardware && one.firmware === firmware);
+  if (build === undefined)
+    throw new Error(`the demo scenario has no build ${hardware} / ${firmware} of ${product.key}`);
+  return build;
 }
 
 /** The context at another time. */

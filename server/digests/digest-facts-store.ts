@@ -1,51 +1,8 @@
-import { OPEN_DROP_STATES } from '@shared/contracts/drops';
 import type { Detector, Line } from '@shared/detectors/detectors';
 import type { Verdict } from '@shared/judging/verdict';
-import { and, asc, eq, gte, inArray, lt, or } from 'drizzle-orm';
+import { and, asc, eq, gte, lt } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
-import {
-  builds,
-  drops,
-  firmwareRevisions,
-  hardwareRevisions,
-  operatingStates,
-  people,
-  products,
-  verdicts,
-} from '../db/schema';
-
-export interface DigestDrop {
-  id: number;
-  product: string;
-  sentence: string;
-  state: (typeof drops.$inferSelect)['state'];
-  owner: string | null;
-  marginDb: number;
-  isOverLimit: boolean;
-  createdAt: number;
-}
-
-/** Drops of a team that are open, or that were raised or ended between two moments; most urgent first. */
-export function listDigestDrops(db: Database, teamId: number, from: number, to: number): DigestDrop[] {
-  const touched = and(gte(drops.updatedAt, from), lt(drops.updatedAt, to));
-  return db
-    .select({
-      id: drops.id,
-      product: products.name,
-      sentence: drops.sentence,
-      state: drops.state,
-      owner: people.name,
-      marginDb: drops.marginDb,
-      isOverLimit: drops.isOverLimit,
-      createdAt: drops.createdAt,
-    })
-    .from(drops)
-    .innerJoin(products, eq(products.id, drops.productId))
-    .leftJoin(people, eq(people.id, drops.ownerId))
-    .where(and(eq(drops.teamId, teamId), or(inArray(drops.state, [...OPEN_DROP_STATES]), touched)))
-    .orderBy(asc(drops.marginDb))
-    .all();
-}
+import { builds, firmwareRevisions, hardwareRevisions, operatingStates, products, verdicts } from '../db/schema';
 
 export interface DigestGain {
   product: string;

@@ -1,8 +1,8 @@
 import type { ProductSummary } from '@shared/contracts/products';
-import { OPEN_DROP_STATES } from '@shared/contracts/drops';
 import type { Context } from '../context';
 import { listOwnProducts } from '../products/list-own-products';
-import { type DigestDrop, type DigestGain, listDigestDrops, listDigestGains } from './digest-facts-store';
+import { type DigestDrops, digestDrops } from './digest-drops';
+import { type DigestGain, listDigestGains } from './digest-facts-store';
 import { type CreepOfBand, listCreep } from './list-creep';
 
 /** Everything a digest says, before it is put into words. */
@@ -14,12 +14,7 @@ export interface DigestFacts {
   from: number;
   to: number;
   products: ProductSummary[];
-  /** Raised in the period and still standing. */
-  newDrops: DigestDrop[];
-  /** Open from before. */
-  olderDrops: DigestDrop[];
-  /** Fixed or accepted in the period. */
-  endedDrops: DigestDrop[];
+  drops: DigestDrops;
   gains: DigestGain[];
   creep: (CreepOfBand & { product: string })[];
 }
@@ -31,9 +26,6 @@ export function digestFacts(
   from: number,
   to: number,
 ): DigestFacts {
-  const drops = listDigestDrops(context.db, team.id, from, to);
-  const isOpen = (drop: DigestDrop) => OPEN_DROP_STATES.some((state) => state === drop.state);
-  const isNew = (drop: DigestDrop) => drop.createdAt >= from && drop.createdAt < to;
   const own = listOwnProducts(context, team.id);
   return {
     teamName: team.name,
@@ -42,9 +34,7 @@ export function digestFacts(
     from,
     to,
     products: own.map(({ summary }) => summary),
-    newDrops: drops.filter((drop) => isOpen(drop) && isNew(drop)),
-    olderDrops: drops.filter((drop) => isOpen(drop) && !isNew(drop)),
-    endedDrops: drops.filter((drop) => drop.state === 'fixed' || drop.state === 'accepted'),
+    drops: digestDrops(context, team.id, from, to),
     gains: listDigestGains(context.db, team.id, from, to),
     creep: own.flatMap(({ id, summary }) =>
       listCreep(context, id, summary.targetMarginDb).map((creep) => ({ ...creep, product: summary.name })),

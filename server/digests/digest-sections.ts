@@ -1,7 +1,7 @@
 import { DROP_STATE_WORDS } from '@shared/contracts/drops';
 import { formatDecibels, formatSignedDecibels } from '@shared/units/format-decibels';
 import type { DigestFacts } from './digest-facts';
-import type { DigestDrop } from './digest-facts-store';
+import type { DigestDrop } from './digest-drops';
 
 export interface DigestSection {
   heading: string;
@@ -14,11 +14,11 @@ export interface DigestSection {
 /** The sections after the five lines: drops, gains, creep, what is not measured. */
 export function digestSections(facts: DigestFacts): DigestSection[] {
   return [
-    { heading: 'New drops', items: facts.newDrops.map((drop) => dropItem(facts, drop)), none: 'Nothing dropped.' },
-    { heading: 'Open from before', items: facts.olderDrops.map((drop) => dropItem(facts, drop)), none: 'None.' },
+    { heading: 'New drops', items: facts.drops.newOnes.map((drop) => dropItem(facts, drop)), none: 'Nothing dropped.' },
+    { heading: 'Open from before', items: facts.drops.older.map((drop) => dropItem(facts, drop)), none: 'None.' },
     {
       heading: 'Gains',
-      items: [...gainItems(facts), ...facts.endedDrops.map((drop) => dropItem(facts, drop))],
+      items: [...gainItems(facts), ...facts.drops.ended.map((drop) => dropItem(facts, drop))],
       none: 'None.',
     },
     { heading: 'Creep', items: creepItems(facts), none: 'No slow loss is seen.' },
@@ -33,7 +33,7 @@ export function digestSections(facts: DigestFacts): DigestSection[] {
 function dropItem({ teamKey }: DigestFacts, drop: DigestDrop): DigestSection['items'][number] {
   const owner = drop.owner === null ? 'nobody has taken it' : `with ${drop.owner}`;
   return {
-    text: `${drop.product}: ${drop.sentence} (${DROP_STATE_WORDS[drop.state]}, ${owner})`,
+    text: `${drop.product}: ${drop.sentence} (${[drop.now, DROP_STATE_WORDS[drop.state], owner].filter((part) => part !== null).join(', ')})`,
     path: `/t/${teamKey}/drops/${drop.id}`,
   };
 }

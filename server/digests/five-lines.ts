@@ -29,15 +29,14 @@ function tightest({ products }: DigestFacts): string {
   return `Tightest: ${build} has ${formatDecibels(marginDb)} left${where} (${target}).`;
 }
 
-function dropped({ newDrops, olderDrops }: DigestFacts): string {
-  const open =
-    olderDrops.length === 0 ? 'none is open from before' : `${counted(olderDrops.length, 'drop')} open from before`;
-  if (newDrops.length === 0) return `Nothing dropped this week; ${open}.`;
-  return `Dropped: ${counted(newDrops.length, 'new drop')} in ${names(newDrops.map(({ product }) => product))}; ${open}.`;
+function dropped({ drops: { newOnes, older } }: DigestFacts): string {
+  const open = older.length === 0 ? 'none is open from before' : `${counted(older.length, 'drop')} open from before`;
+  if (newOnes.length === 0) return `Nothing dropped this week; ${open}.`;
+  return `Dropped: ${counted(newOnes.length, 'new drop')} in ${names(newOnes.map(({ product }) => product))}; ${open}.`;
 }
 
-function recovered({ gains, endedDrops }: DigestFacts): string {
-  if (gains.length === 0 && endedDrops.length === 0) return 'Nothing gained margin or was closed this week.';
+function recovered({ gains, drops: { ended } }: DigestFacts): string {
+  if (gains.length === 0 && ended.length === 0) return 'Nothing gained margin or was closed this week.';
   const parts: string[] = [];
   const largest = gains
     .filter(({ differenceDb }) => differenceDb !== null)
@@ -47,7 +46,7 @@ function recovered({ gains, endedDrops }: DigestFacts): string {
       `${largest.product} ${largest.hardware} / ${largest.firmware} gained up to ${formatSignedDecibels(largest.differenceDb)}`,
     );
   }
-  if (endedDrops.length > 0) parts.push(`${counted(endedDrops.length, 'drop')} fixed or accepted`);
+  if (ended.length > 0) parts.push(`${counted(ended.length, 'drop')} fixed or accepted`);
   return `Gained: ${parts.join('; ')}.`;
 }
 

@@ -41,10 +41,10 @@ export function renderDigest(
   };
 }
 
-function subjectOf({ teamName, newDrops, products }: DigestFacts): string {
+function subjectOf({ teamName, drops: { newOnes }, products }: DigestFacts): string {
   const over = products.filter(({ latestBuild }) => (latestBuild?.worstMarginDb ?? 0) < 0).length;
   const dropped =
-    newDrops.length === 0 ? 'nothing dropped' : `${newDrops.length} new drop${newDrops.length === 1 ? '' : 's'}`;
+    newOnes.length === 0 ? 'nothing dropped' : `${newOnes.length} new drop${newOnes.length === 1 ? '' : 's'}`;
   return `${teamName}: ${dropped}${over > 0 ? `, ${over} over the limit` : ''}`;
 }
 
