@@ -1,5 +1,5 @@
 import type { Detector } from '@shared/detectors/detectors';
-import { type Band, bandsFor } from '@shared/limits/bands';
+import { type Band, bandsFor, teamBand } from '@shared/limits/bands';
 import type { LimitLine } from '@shared/limits/limit-line';
 import type { LimitSet } from '@shared/limits/limit-set';
 import { findLimitSet, lineForDetector } from '@shared/limits/limit-sets';
@@ -23,10 +23,7 @@ export function seriesPlan(limitSetKey: string, detector: Detector, teamBands: r
   const set = planSet(limitSetKey);
   const line = lineForDetector(set, detector);
   if (line === undefined) throw new Error(`the limit set ${limitSetKey} has no line for ${detector} readings`);
-  const bands = bandsFor(
-    line,
-    teamBands.map(({ name, fromHz, toHz }) => ({ key: name, fromHz, toHz })),
-  );
+  const bands = bandsFor(line, teamBands.map(teamBand));
   return { limitLineKey: limitLineKey(limitSetKey, set.version, detector), line, bands };
 }
 

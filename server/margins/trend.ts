@@ -1,5 +1,5 @@
 import { groupBy } from '@shared/collections/group-by';
-import { bandsFor } from '@shared/limits/bands';
+import { bandsFor, teamBand } from '@shared/limits/bands';
 import { findLimitSet } from '@shared/limits/limit-sets';
 import type { TrendView } from '@shared/contracts/margins';
 import { listBuilds } from '../builds/list-builds';
@@ -51,7 +51,7 @@ export function trend(
 }
 
 function bandKeys(limitSetKey: string, teamBands: { name: string; fromHz: number; toHz: number }[]): string[] {
-  const own = teamBands.map(({ name, fromHz, toHz }) => ({ key: name, fromHz, toHz }));
+  const own = teamBands.map(teamBand);
   const lines = findLimitSet(limitSetKey)?.lines ?? [];
   return [...new Set(lines.flatMap((line) => bandsFor(line, own)).map(({ key }) => key))];
 }

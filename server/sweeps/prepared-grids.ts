@@ -1,5 +1,5 @@
 import type { Detector } from '@shared/detectors/detectors';
-import { bandsFor } from '@shared/limits/bands';
+import { bandsFor, teamBand } from '@shared/limits/bands';
 import { cellEdgesHz } from '@shared/limits/cells';
 import type { LimitLine } from '@shared/limits/limit-line';
 import type { LimitSet } from '@shared/limits/limit-set';
@@ -51,8 +51,7 @@ export function knownGrid(
     kept.set(key, found);
     return found;
   }
-  const own = teamBands.map(({ name, fromHz, toHz }) => ({ key: name, fromHz, toHz }));
-  const prepared = prepareGrid(frequenciesHz, line, bandsFor(line, own), CELL_EDGES_HZ);
+  const prepared = prepareGrid(frequenciesHz, line, bandsFor(line, teamBands.map(teamBand)), CELL_EDGES_HZ);
   const known = { ...prepared, description: describeGrid(frequenciesHz) };
   kept.set(key, known);
   forgetOldest();

@@ -12,7 +12,10 @@ export function editTeam(context: Context, actor: Actor, team: Team, patch: Team
   if (Object.keys(patch).length === 0) return team;
   return withTransaction(context.db, () => {
     const changed = updateTeam(context.db, team.id, patch);
-    const isJudgedAnew = changed.thresholdDb !== team.thresholdDb || changed.targetMarginDb !== team.targetMarginDb;
+    const isJudgedAnew =
+      changed.thresholdDb !== team.thresholdDb ||
+      changed.targetMarginDb !== team.targetMarginDb ||
+      JSON.stringify(changed.bands) !== JSON.stringify(team.bands);
     if (isJudgedAnew) for (const productId of listProductIds(context.db, team.id)) markStale(context, productId, 0);
     recordAudit(context, actor, {
       teamId: team.id,

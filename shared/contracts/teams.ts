@@ -18,12 +18,20 @@ export type TeamView = z.infer<typeof TeamView>;
 export const TeamBandInput = z
   .object({ name: Name, fromHz: z.number().min(150e3).max(30e6), toHz: z.number().min(150e3).max(30e6) })
   .refine((band) => band.fromHz < band.toHz, 'a band must end above its start');
+
+function refuseSameNames(bands: readonly { name: string }[], check: z.RefinementCtx): void {
+  bands.forEach(({ name }, index) => {
+    if (bands.findIndex((band) => band.name === name) === index) return;
+    check.addIssue({ code: 'custom', path: [index, 'name'], message: `"${name}" names another band already` });
+  });
+}
+
 export const TeamPatch = z.object({
   name: Name.optional(),
   timeZone: TimeZone.optional(),
   targetMarginDb: z.number().min(0).max(40).optional(),
   thresholdDb: z.number().min(0.5).max(20).optional(),
-  bands: z.array(TeamBandInput).max(12).optional(),
+  bands: z.array(TeamBandInput).max(12).superRefine(refuseSameNames).optional(),
 });
 export type TeamPatch = z.infer<typeof TeamPatch>;
 

@@ -2,7 +2,7 @@ import type { LimitLine } from './limit-line';
 
 /** A stretch of frequency that gets one worst margin and one verdict. Both ends belong to it. */
 export interface Band {
-  /** Written in MHz, for example "0.15-0.5 MHz"; a team's own band may have any name. */
+  /** Written in MHz, for example "0.15-0.5 MHz"; before it the name of a team's own band. */
   readonly key: string;
   readonly fromHz: number;
   readonly toHz: number;
@@ -13,6 +13,14 @@ const TRADE_EDGES_HZ = [500_000, 5_000_000];
 
 export function bandKey(fromHz: number, toHz: number): string {
   return `${fromHz / 1e6}-${toHz / 1e6} MHz`;
+}
+
+/**
+ * A team's own band under its name and range, such as "Radio 0.5-1.6 MHz". The range belongs to the key, so that a band whose
+ * range is changed is another one: margins taken in the old range are never compared with those in the new.
+ */
+export function teamBand({ name, fromHz, toHz }: { name: string; fromHz: number; toHz: number }): Band {
+  return { key: `${name} ${bandKey(fromHz, toHz)}`, fromHz, toHz };
 }
 
 /**
