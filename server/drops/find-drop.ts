@@ -13,8 +13,9 @@ import { traceDrop, type TracedDrop } from './trace-drop';
  * @throws ServiceError `notFound` for an unknown or foreign drop alike; `forbidden`
  */
 export function findDrop(context: Context, actor: Actor, id: number, action: Action): TracedDrop {
+  const missing = `there is no drop ${id} for you`;
   const found = findNamedDrop(context.db, id);
-  if (found === undefined) throw new ServiceError('notFound', `there is no drop ${id} for you`);
-  requireProduct(context, actor, productById(context, found.drop.productId), action);
+  if (found === undefined) throw new ServiceError('notFound', missing);
+  requireProduct(context, actor, productById(context, found.drop.productId), action, missing);
   return traceDrop(found, listSightings(context.db, [id]));
 }

@@ -1,4 +1,4 @@
-import { may } from '@shared/access/may';
+import { belongsTo, may } from '@shared/access/may';
 import type { Action } from '@shared/access/permissions';
 import type { Actor } from '../actor';
 import type { Context } from '../context';
@@ -39,20 +39,29 @@ export function findProduct(
     const names = candidates.map(({ team }) => team.key).join(', ');
     throw new ServiceError('invalid', `several teams have a product "${key}" (${names}): name one with team=`);
   }
-  return { ...found, isShared: requireProduct(context, actor, found.product, action) };
+  const isShared = requireProduct(context, actor, found.product, action, `there is no product "${key}" for you`);
+  return { ...found, isShared };
 }
 
 /**
  * Stops an actor who may not do the action with the product, whatever way it was found.
  *
+ * @param missing what somebody is told who must not learn that there is such a thing
  * @returns whether the product is read through a share
  */
-export function requireProduct(context: Context, actor: Actor, product: Product, action: Action): boolean {
+export function requireProduct(
+  context: Context,
+  actor: Actor,
+  product: Product,
+  action: Action,
+  missing: string,
+): boolean {
   if (may(actor, action, product.teamId)) return false;
   if (action === 'results.read' && isReadThroughShare(context, actor, product)) return true;
   if (action !== 'results.read' && isReadThroughShare(context, actor, product)) {
     throw new ServiceError('forbidden', `the product "${product.key}" is shared with your team to read only`);
   }
+  if (!belongsTo(actor, product.teamId)) throw new ServiceError('notFound', missing);
   requirePermission(actor, action, product.teamId);
   return false;
 }

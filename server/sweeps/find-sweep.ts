@@ -13,16 +13,11 @@ export type { SweepRow };
  * @throws ServiceError `notFound` for an unknown and a foreign sweep alike; `forbidden`
  */
 export function findSweep(context: Context, actor: Actor, id: number, action: Action): SweepRow {
+  const missing = `there is no sweep ${id} for you`;
   const row = findSweepRow(context.db, id);
-  try {
-    if (row !== undefined) {
-      requireProduct(context, actor, row.product, action);
-      return row;
-    }
-  } catch (error) {
-    if (!(error instanceof ServiceError) || error.code !== 'notFound') throw error;
-  }
-  throw new ServiceError('notFound', `there is no sweep ${id} for you`);
+  if (row === undefined) throw new ServiceError('notFound', missing);
+  requireProduct(context, actor, row.product, action, missing);
+  return row;
 }
 
 /** The sweep with this row id, which must exist. */

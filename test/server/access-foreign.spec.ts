@@ -41,6 +41,10 @@ const GUESSED: [Method, string, (ids: Ids) => string, object][] = [
   ['get', 'a trace', ({ sweep }) => `/api/v1/sweeps/${sweep}/trace`, {}],
   ['get', 'a file', ({ sweep }) => `/api/v1/sweeps/${sweep}/file`, {}],
   ['delete', 'a sweep', ({ sweep }) => `/api/v1/sweeps/${sweep}`, {}],
+  ['get', 'a drop', ({ drop }) => `/api/v1/drops/${drop}`, {}],
+  ['post', 'a move of a drop', ({ drop }) => `/api/v1/drops/${drop}/moves`, { state: 'checking' }],
+  ['put', 'the owner of a drop', ({ drop }) => `/api/v1/drops/${drop}/owner`, { personId: null }],
+  ['post', 'a note on a drop', ({ drop }) => `/api/v1/drops/${drop}/notes`, { text: 'hello' }],
   ['get', 'a run', ({ run }) => `/api/v1/runs/${run}`, {}],
 ];
 
