@@ -60,7 +60,9 @@ function gatherOne(
 ): GatheredSeries {
   const { stateId, stateName, line, detector } = sweeps[0];
   const plan = seriesPlan(record.product.limitSetKey, detector, record.team.bands);
-  const bands = [...new Set(sweeps.flatMap((sweep) => sweep.bands.map(({ band }) => band)))];
+  const taken = new Set(sweeps.flatMap((sweep) => sweep.bands.map(({ band }) => band)));
+  // Sweeps keep what was taken in bands the team has given up since.
+  const bands = plan.bands.map(({ key }) => key).filter((band) => taken.has(band));
   const sweepsOf = groupBy(earlierSweeps, ({ buildId }) => buildId);
   return {
     stateId,

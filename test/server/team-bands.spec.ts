@@ -54,6 +54,25 @@ describe('a band of a team', () => {
     expect(context.db.select().from(drops).all()).toEqual([]);
   });
 
+  it('that the team gave up is judged no more, and its drops are withdrawn', async () => {
+    await patch([{ name: 'Radio', fromHz: 500e3, toHz: 1.6e6 }]).expect(200);
+    for (const n of [1, 2, 3, 4, 5]) measure(n);
+    const peaks = [[1_000_500, 50] as const, [1_801_500, 52] as const];
+    measureBuild(context, laboratory, 6, { levelsDbuv: [0, 0], shape: { peaks } });
+    judgeProductNow(context, laboratory.product.id);
+    const dropsByBand = () =>
+      context.db
+        .select()
+        .from(drops)
+        .all()
+        .map(({ band, state }) => [band, state]);
+    expect(dropsByBand()).toEqual([['Radio 0.5-1.6 MHz', 'new']]);
+    await patch([]).expect(200);
+    judgeProductNow(context, laboratory.product.id);
+    expect(dropsByBand()).toEqual([['Radio 0.5-1.6 MHz', 'withdrawn']]);
+    expect(verdictsOf(6).map(({ band }) => band)).toEqual(['0.15-0.5 MHz', '0.5-5 MHz', '5-30 MHz']);
+  });
+
   it('has its range beside its name wherever bands are named', async () => {
     await patch([{ name: '0.5-5 MHz', fromHz: 600e3, toHz: 700e3 }]).expect(200);
     measure(1);
