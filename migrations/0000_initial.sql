@@ -452,7 +452,7 @@ CREATE TABLE `sweeps` (
 --> statement-breakpoint
 CREATE UNIQUE INDEX `sweeps_identity` ON `sweeps` (`product_id`,`identity`);--> statement-breakpoint
 CREATE INDEX `sweeps_build` ON `sweeps` (`build_id`,`kind`);--> statement-breakpoint
-CREATE INDEX `sweeps_trend` ON `sweeps` (`product_id`,`kind`,`build_id`,`is_superseded`,`state_id`,`line`,`detector`,`run`,`worst_margin_db`,`worst_frequency_hz`);--> statement-breakpoint
+CREATE INDEX `sweeps_trend` ON `sweeps` (`product_id`,`kind`,`build_id`,`is_superseded`,`state_id`,`line`,`detector`,`run`,`bench_id`,`unit_id`,`worst_margin_db`,`worst_frequency_hz`);--> statement-breakpoint
 CREATE INDEX `sweeps_product_taken` ON `sweeps` (`product_id`,`taken_at`);--> statement-breakpoint
 CREATE INDEX `sweeps_bench_taken` ON `sweeps` (`bench_id`,`taken_at`);--> statement-breakpoint
 CREATE INDEX `sweeps_team_imported` ON `sweeps` (`team_id`,`imported_at`);--> statement-breakpoint

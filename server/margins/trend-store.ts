@@ -20,6 +20,8 @@ export interface TrendSweep {
   line: Line;
   detector: Detector;
   run: string;
+  benchId: number;
+  unitId: number | null;
   marginDb: number | null;
   frequencyHz: number | null;
 }
@@ -30,6 +32,8 @@ const SERIES = {
   line: sweeps.line,
   detector: sweeps.detector,
   run: sweeps.run,
+  benchId: sweeps.benchId,
+  unitId: sweeps.unitId,
 };
 
 /** Worst points over the whole range, read from an index alone. */

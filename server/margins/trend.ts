@@ -71,9 +71,9 @@ function worstSeries(
   const series = sweeps
     .filter(hasMargin)
     .filter((sweep) => sweep.stateId === stateId && sweep.line === line && sweep.detector === detector);
-  const perRun = [...groupBy(series, ({ run }) => run).values()].map((run) =>
-    Math.min(...run.map(({ marginDb }) => marginDb)),
-  );
+  // As when it is judged: the name of a session alone may come again on another bench or unit.
+  const runs = groupBy(series, ({ run, benchId, unitId }) => JSON.stringify([run, benchId, unitId]));
+  const perRun = [...runs.values()].map((run) => Math.min(...run.map(({ marginDb }) => marginDb)));
   return {
     worstMarginDb: worst.marginDb,
     worstFrequencyHz: worst.frequencyHz,

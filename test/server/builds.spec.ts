@@ -127,6 +127,25 @@ describe('trend and margin map', () => {
     expect(points[2]?.worstFrequencyHz).toBeCloseTo(501_000, -3);
   });
 
+  it('count one session on two units as two runs, as the judgement does', async () => {
+    sweep('1.3', '04', { line: 'L', run: 'a', unit: '0001' }, 44);
+    sweep('1.3', '04', { line: 'L', run: 'a', unit: '0002' }, 47);
+    const { body } = await technician.get('/api/v1/products/psu-240/trend').expect(200);
+    const { runs, lowestDb, highestDb } = (body as TrendView).points.at(-1) ?? {};
+    expect(runs).toBe(2);
+    expect([lowestDb, highestDb].map((db) => Math.round(db ?? 0))).toEqual([9, 12]);
+  });
+
+  it('is read from an index alone', () => {
+    const plans = context.db.$client.prepare(
+      `explain query plan select build_id, state_id, line, detector, run, bench_id, unit_id, worst_margin_db, worst_frequency_hz
+       from sweeps where product_id = 1 and kind = 'product' and is_superseded = 0 order by build_id`,
+    );
+    expect((plans.all() as { detail: string }[]).map(({ detail }) => detail)).toEqual([
+      expect.stringContaining('USING COVERING INDEX sweeps_trend'),
+    ]);
+  });
+
   it('count a PK reading only where no QP reading of the same line decides', async () => {
     sweep('1.3', '04', { line: 'L', detector: 'PK' }, 60);
     const worst = async (query = '') =>

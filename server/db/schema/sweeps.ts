@@ -97,6 +97,8 @@ export const sweeps = sqliteTable(
       table.line,
       table.detector,
       table.run,
+      table.benchId,
+      table.unitId,
       table.worstMarginDb,
       table.worstFrequencyHz,
     ),
