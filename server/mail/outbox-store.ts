@@ -1,4 +1,4 @@
-import { and, asc, eq, lte } from 'drizzle-orm';
+import { and, asc, eq, inArray, lt, lte, ne } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
 import { outboxAttachments, outboxMails } from '../db/schema';
 
@@ -49,6 +49,18 @@ export function findDueMail(db: Database, id: number, now: number): OutboxMail |
     .from(outboxMails)
     .where(and(eq(outboxMails.id, id), eq(outboxMails.status, 'waiting'), lte(outboxMails.nextAttemptAt, now)))
     .get();
+}
+
+/** Removes words and pictures of mails that were written before the moment and are not waiting. Returns how many. */
+export function emptyEndedMails(db: Database, before: number): number {
+  const ended = and(ne(outboxMails.status, 'waiting'), lt(outboxMails.createdAt, before));
+  const ids = db.select({ id: outboxMails.id }).from(outboxMails).where(ended);
+  db.delete(outboxAttachments).where(inArray(outboxAttachments.mailId, ids)).run();
+  return db
+    .update(outboxMails)
+    .set({ text: '', html: '' })
+    .where(and(ended, ne(outboxMails.html, '')))
+    .run().changes;
 }
 
 export function updateMail(db: Database, id: number, change: Partial<NewOutboxMail>): void {

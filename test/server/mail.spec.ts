@@ -2,8 +2,9 @@ import { eq } from 'drizzle-orm';
 import { createServer, type AddressInfo, type Server } from 'node:net';
 import request from 'supertest';
 import { createApp } from '../../server/app';
-import { outboxMails } from '../../server/db/schema';
+import { outboxAttachments, outboxMails } from '../../server/db/schema';
 import { type Mailbox, openMailbox } from '../../server/mail/open-mailbox';
+import { pruneMail } from '../../server/mail/prune-mail';
 import { queueMail } from '../../server/mail/queue-mail';
 import { requestDueMail } from '../../server/mail/request-mail';
 import { sendWaitingMail, withLocalMailbox } from '../support/local-mailbox';
@@ -39,6 +40,26 @@ function queue(onceKey: string, toEmail = 'reader@strandline.example') {
 const row = (id: number) => context.db.select().from(outboxMails).where(eq(outboxMails.id, id)).get();
 
 describe('the outbox', () => {
+  it('empties what was sent a month ago and keeps its record, so that it is not written again', async () => {
+    const { id } = queue('week 10');
+    await sendWaitingMail(context);
+    context.clock.advance(29 * 24 * 60 * MINUTE_MS);
+    const { id: waiting } = queue('week 14');
+    expect(pruneMail(context)).toBe(0);
+    context.clock.advance(2 * 24 * 60 * MINUTE_MS);
+    expect(pruneMail(context)).toBe(1);
+    expect(row(id)).toMatchObject({ status: 'sent', text: '', html: '' });
+    expect(
+      context.db
+        .select()
+        .from(outboxAttachments)
+        .all()
+        .map(({ mailId }) => mailId),
+    ).toEqual([waiting]);
+    expect(queue('week 10').id).toBe(id);
+    expect(pruneMail(context)).toBe(0);
+  });
+
   it('hands a mail to the server and the mailbox page shows it whole', async () => {
     const { id } = queue('week 10');
     await sendWaitingMail(context);
