@@ -106,6 +106,28 @@ describe('the main job, by page', () => {
     await visit.page.getByText('Ivo Brasted').first().waitFor();
   });
 
+  it('a lead has the digest sent and finds it in the local mailbox, with the drop and a picture', async () => {
+    await visit.signIn('lead');
+    await visit.open('/t/charging/digest');
+    await visit.page.getByRole('button', { name: 'Send me one now' }).click();
+    await expectSoon(async () => {
+      await visit.open('/mailbox');
+      await visit.page.getByRole('heading', { name: 'Mailbox' }).waitFor();
+      return visit.page.getByRole('link', { name: /Charging: \d+ new drop.*runa/ }).isVisible();
+    });
+    await visit.page.getByRole('link', { name: /Charging: \d+ new drop.*runa/ }).click();
+    const letter = visit.page.frameLocator('iframe');
+    await letter
+      .getByText(/Firmware 1\.1\.0 lost/)
+      .first()
+      .waitFor();
+    const width = await letter
+      .getByRole('img')
+      .first()
+      .evaluate((image: HTMLImageElement) => image.naturalWidth);
+    expect(width).toBeGreaterThan(0);
+  });
+
   it('a viewer sees the drop and may neither move it nor import', async () => {
     await visit.signIn('viewer');
     await visit.open('/t/charging/drops');
@@ -203,18 +225,16 @@ describe('the main job, by interface', () => {
   });
 });
 
-/** Signs the lead in without a page and makes a team token. */
+/** Makes a token for a bench and a pipeline on the page of the lead. */
 async function makeToken(): Promise<string> {
   await visit.signIn('lead');
-  return visit.page.evaluate(async () => {
-    const token = /XSRF-TOKEN=([^;]+)/.exec(document.cookie)?.[1] ?? '';
-    const response = await fetch('/api/teams/charging/tokens', {
-      method: 'POST',
-      headers: { 'content-type': 'application/json', 'x-xsrf-token': decodeURIComponent(token) },
-      body: JSON.stringify({ name: 'bench 2', scopes: ['sweeps:write', 'results:read', 'gate:read'] }),
-    });
-    return ((await response.json()) as { token: string }).token;
-  });
+  await visit.open('/t/charging/tokens');
+  await visit.page.getByLabel('Name').fill('bench 2');
+  for (const scope of ['sweeps:write', 'results:read', 'gate:read']) {
+    await visit.page.getByRole('checkbox', { name: scope }).check();
+  }
+  await visit.page.getByRole('button', { name: 'Make the token' }).click();
+  return visit.page.getByText(/^strand_\d+_[\w-]{43}$/).innerText();
 }
 
 /** Asks until it is so; a page that waits for a job has no event to wait for. */
