@@ -1,10 +1,10 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { MatIcon } from '@angular/material/icon';
 import type { DropView } from '@shared/contracts/drops';
 import { findLimitSet } from '@shared/limits/limit-sets';
 import { FrequencyPipe } from '../ui/frequency';
-import { MarginValue } from '../ui/margin-value';
 import { leadWitness } from './lead-witness';
-import { targetWords } from './margin-words';
+import { marginWords, targetWords } from './margin-words';
 import { QuestionBlock } from './question-block';
 import { buildName } from './sighting-words';
 import { SightingsTable } from './sightings-table';
@@ -12,14 +12,16 @@ import { SightingsTable } from './sightings-table';
 /** Margin to the limit and to the target, and what may be said of meeting the limit. */
 @Component({
   selector: 'app-left-block',
-  imports: [FrequencyPipe, MarginValue, QuestionBlock, SightingsTable],
+  imports: [FrequencyPipe, MatIcon, QuestionBlock, SightingsTable],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     @let judgement = this.lead();
     <app-question-block question="How much is left?">
-      <p class="margin">
-        <app-margin-value [marginDb]="drop().latest.marginDb" [targetMarginDb]="drop().evidence.targetMarginDb" />
-        <span class="muted small">least margin of the runs in {{ latest() }}</span>
+      <p class="margin" [class.over]="drop().latest.isOverLimit">
+        @if (drop().latest.isOverLimit) {
+          <mat-icon svgIcon="over" />
+        }
+        {{ left() }}
       </p>
       <app-sightings-table [drop]="drop()" [teamKey]="teamKey()" />
       <ul>
@@ -38,13 +40,17 @@ import { SightingsTable } from './sightings-table';
   styles: `
     .margin {
       display: flex;
-      flex-wrap: wrap;
-      gap: 0 10px;
-      align-items: baseline;
+      gap: 6px;
+      align-items: center;
+      font-size: 18px;
+      line-height: 24px;
     }
-    app-margin-value {
-      font-size: 26px;
-      line-height: 34px;
+    .over {
+      color: var(--sl-margin-text-over);
+    }
+    mat-icon {
+      width: 20px;
+      height: 20px;
     }
     ul {
       display: grid;
@@ -60,7 +66,10 @@ export class LeftBlock {
   readonly teamKey = input.required<string>();
 
   protected readonly lead = computed(() => leadWitness(this.drop()).judgement);
-  protected readonly latest = computed(() => buildName(this.drop().latest));
+  protected readonly left = computed(() => {
+    const words = marginWords(this.drop().latest.marginDb);
+    return `${words.charAt(0).toUpperCase()}${words.slice(1)} in ${buildName(this.drop().latest)}`;
+  });
   protected readonly raisedIn = computed(() => buildName(this.drop()));
   protected readonly limit = computed(() => {
     const { limitSetKey, limitSetVersion } = this.drop().evidence;

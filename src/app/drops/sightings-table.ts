@@ -38,7 +38,7 @@ import { buildName, marginBeforeDb } from './sighting-words';
                   [queryParams]="owner()"
                   >{{ row.name }}</a
                 >
-                <span class="muted small">{{ row.part }}</span>
+                <span class="part muted small">{{ row.part }}</span>
               </td>
               <td class="number">
                 <app-margin-value [marginDb]="row.marginDb" [targetMarginDb]="targetDb()" />
@@ -75,6 +75,9 @@ import { buildName, marginBeforeDb } from './sighting-words';
     .table-frame {
       position: relative;
       max-width: 900px;
+    }
+    .part {
+      margin-inline-start: 8px;
     }
     .slide {
       min-width: 180px;

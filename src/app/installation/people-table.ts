@@ -28,7 +28,8 @@ import { PersonPanel } from './person-panel';
     }
     @media (max-width: 719px) {
       .since,
-      .email {
+      .email,
+      .teams {
         display: none;
       }
     }

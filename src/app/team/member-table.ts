@@ -22,7 +22,7 @@ import { ROLE_WORDS } from './role-words';
         <thead>
           <tr>
             <th scope="col">Name</th>
-            <th scope="col">E-mail</th>
+            <th scope="col" class="email">E-mail</th>
             <th scope="col">Role</th>
             <th scope="col" class="since">Since</th>
             @if (mayManage()) {
@@ -38,14 +38,14 @@ import { ROLE_WORDS } from './role-words';
                 @if (member.personId === myId()) {
                   <span class="muted">(you)</span>
                 }
+                <span class="below muted small">{{ member.email }}</span>
               </td>
-              <td class="muted">{{ member.email }}</td>
-              <td>
+              <td class="email muted">{{ member.email }}</td>
+              <td class="role">
                 @if (mayManage()) {
                   <button
                     mat-button
                     type="button"
-                    class="role"
                     [matMenuTriggerFor]="roles"
                     [attr.aria-label]="'Role of ' + member.name + ': ' + member.role"
                   >
@@ -91,18 +91,28 @@ import { ROLE_WORDS } from './role-words';
     .table-frame {
       position: relative;
     }
-    .role {
-      margin-inline-start: -12px;
-    }
-    td {
+    .role,
+    .act {
       padding-block: 2px;
+    }
+    .role button {
+      margin-inline-start: -12px;
     }
     .act {
       text-align: end;
     }
+    .below {
+      display: none;
+    }
     @media (max-width: 719px) {
-      .since {
+      .since,
+      .email {
         display: none;
+      }
+      .below {
+        display: block;
+        overflow-wrap: anywhere;
+        white-space: normal;
       }
     }
   `,

@@ -29,6 +29,7 @@ import { TeamSettings } from './team-settings';
   styles: `
     .sheet {
       display: grid;
+      grid-template-columns: minmax(0, 1fr);
       gap: 12px;
     }
   `,

@@ -4,6 +4,7 @@ import type { IconName } from '../ui/icons';
 export const JOB_WORDS: Record<JobName, string> = {
   judge: 'Judge builds',
   import: 'Import files',
+  remeasure: 'Take margins again',
   digest: 'Write the digest',
   mail: 'Send mail',
   prune: 'Tidy old records',

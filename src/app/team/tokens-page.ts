@@ -25,6 +25,7 @@ import { TokenTable } from './token-table';
   styles: `
     .sheet {
       display: grid;
+      grid-template-columns: minmax(0, 1fr);
       gap: 12px;
     }
   `,
