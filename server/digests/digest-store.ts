@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, inArray, isNull, like, or, sql } from 'drizzle-orm';
+import { and, asc, desc, eq, inArray, isNull, like, notLike, or, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
 import { digestRecipients, digests, digestSettings, memberships, outboxMails, people, teams } from '../db/schema';
 
@@ -35,8 +35,8 @@ export function listRecipients(db: Database, teamId: number): DigestRecipient[] 
     .all();
 }
 
-/** Those who did not unsubscribe: addresses outside, and people who are still members and may sign in. */
-export function listSubscribed(db: Database, teamId: number): DigestRecipient[] {
+/** Those who may get the digest, unsubscribed or not: addresses outside, and people who are still members and may sign in. */
+export function listReaders(db: Database, teamId: number): DigestRecipient[] {
   const members = db
     .select({ id: memberships.personId })
     .from(memberships)
@@ -48,7 +48,6 @@ export function listSubscribed(db: Database, teamId: number): DigestRecipient[] 
     .where(
       and(
         eq(digestRecipients.teamId, teamId),
-        isNull(digestRecipients.unsubscribedAt),
         or(isNull(digestRecipients.personId), inArray(digestRecipients.personId, members)),
       ),
     )
@@ -99,7 +98,8 @@ export function findDigest(db: Database, teamId: number, period: string): Digest
 
 /** The last digests of a team, newest first, without those asked for by hand. */
 export function listDigests(db: Database, teamId: number, limit: number): Digest[] {
-  return db.select().from(digests).where(eq(digests.teamId, teamId)).orderBy(desc(digests.id)).limit(limit).all();
+  const weekly = and(eq(digests.teamId, teamId), notLike(digests.period, 'now-%'));
+  return db.select().from(digests).where(weekly).orderBy(desc(digests.id)).limit(limit).all();
 }
 
 /** How many mails of a digest are in which state. */

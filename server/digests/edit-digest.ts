@@ -1,5 +1,7 @@
 import type { DigestPatch, DigestRecipientInput } from '@shared/contracts/digests';
 import type * as z from 'zod';
+import { personWithEmail } from '../accounts/find-person';
+import { personActor } from '../accounts/person-actor';
 import type { Actor, PersonActor } from '../actor';
 import { recordAudit } from '../audit/record-audit';
 import type { Context } from '../context';
@@ -26,7 +28,11 @@ export function editDigest(context: Context, actor: Actor, team: Team, patch: z.
   });
 }
 
-/** Adds somebody, member or not, to those who get the digest. */
+/**
+ * Adds somebody to those who get the digest: a member for as long as they are one, or an address outside.
+ *
+ * @throws ServiceError `conflict` for somebody who unsubscribed
+ */
 export function addRecipient(
   context: Context,
   actor: Actor,
@@ -34,9 +40,19 @@ export function addRecipient(
   input: z.infer<typeof DigestRecipientInput>,
 ): void {
   withTransaction(context.db, () => {
+    const standing = listRecipients(context.db, team.id).find(({ email }) => email === input.email);
+    if (standing !== undefined && standing.unsubscribedAt !== null) {
+      throw new ServiceError(
+        'conflict',
+        `email: ${input.email} unsubscribed; remove the address first if the person asks for the digest again`,
+      );
+    }
+    const person = personWithEmail(context, input.email);
+    const member = person && personActor(context, person.id);
     upsertRecipient(context.db, {
       ...input,
       teamId: team.id,
+      personId: member?.roles.has(team.id) ? member.personId : null,
       unsubscribeSecret: newSecret(),
       createdAt: context.now(),
     });

@@ -30,11 +30,11 @@ export function requestDueDigests(context: Context, trigger: 'schedule' | 'start
   }
 }
 
-/** Asks for a digest of the last seven days for the asking person alone, who becomes a recipient if need be. */
+/** Asks for a digest of the last seven days for the asking person alone, who gets the weekly one as before or not. */
 export function requestDigestNow(context: Context, person: PersonActor, teamId: number): JobRun {
   const { personId, email, name } = person;
   const recipient =
-    listRecipients(context.db, teamId).find((one) => one.email === email && one.unsubscribedAt === null) ??
+    listRecipients(context.db, teamId).find((one) => one.email === email) ??
     upsertRecipient(context.db, {
       teamId,
       personId,
@@ -42,6 +42,7 @@ export function requestDigestNow(context: Context, person: PersonActor, teamId: 
       name,
       unsubscribeSecret: newSecret(),
       createdAt: context.now(),
+      unsubscribedAt: context.now(),
     });
   return enqueueRun(context, person, {
     job: 'digest',

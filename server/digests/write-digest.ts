@@ -5,7 +5,7 @@ import type { HeldRun } from '../queue/held-run';
 import { teamById } from '../teams/find-team';
 import { digestFacts, type DigestFacts } from './digest-facts';
 import { isoWeek } from './digest-schedule';
-import { type DigestRecipient, findDigest, insertDigest, listSubscribed } from './digest-store';
+import { type DigestRecipient, findDigest, insertDigest, listReaders } from './digest-store';
 import { renderDigest, type RenderedDigest, UNSUBSCRIBE_PLACE } from './render-digest';
 import { DigestOrder } from './digest-order';
 import { trendPicture } from './trend-picture';
@@ -25,10 +25,11 @@ interface Picture {
  */
 export async function writeDigest(context: Context, held: HeldRun): Promise<void> {
   const order = DigestOrder.parse(held.run.payload);
+  const { onlyRecipientId } = order;
   const team = teamById(context, order.teamId);
-  const period = order.onlyRecipientId === undefined ? isoWeek(order.dueAt, team.timeZone) : `now-${held.run.id}`;
-  const recipients = listSubscribed(context.db, team.id).filter(
-    ({ id }) => order.onlyRecipientId === undefined || id === order.onlyRecipientId,
+  const period = onlyRecipientId === undefined ? isoWeek(order.dueAt, team.timeZone) : `now-${held.run.id}`;
+  const recipients = listReaders(context.db, team.id).filter(({ id, unsubscribedAt }) =>
+    onlyRecipientId === undefined ? unsubscribedAt === null : id === onlyRecipientId,
   );
   held.expect(recipients.length);
   const facts = digestFacts(context, team, order.dueAt - WEEK_MS, order.dueAt);

@@ -3,7 +3,7 @@ import request from 'supertest';
 import { createApp } from '../../server/app';
 import { mailboxMessages, outboxMails } from '../../server/db/schema';
 import { requestDueDigests } from '../../server/digests/request-digests';
-import { upsertRecipient, writeSetting } from '../../server/digests/digest-store';
+import { listReaders, upsertRecipient, writeSetting } from '../../server/digests/digest-store';
 import { writeDigest } from '../../server/digests/write-digest';
 import { judgeProductNow } from '../../server/judging/judge-stale-builds';
 import type { Mailbox } from '../../server/mail/open-mailbox';
@@ -182,5 +182,32 @@ describe('digest settings', () => {
     await visitor.post('/api/teams/chargers/digest/now').expect(202);
     await workDigest('one');
     expect(mails().map(({ toEmail }) => toEmail)).toEqual([actor.email]);
+    const { body } = await visitor.get('/api/teams/chargers/digest').expect(200);
+    expect(body).toMatchObject({ mine: false, sent: [] });
+  });
+
+  it('end the digest of a member a lead added with the membership', async () => {
+    const app = createApp(context);
+    const { visitor: lead } = await signInAs(context, app, { teamId, role: 'lead' });
+    const { person } = buildPerson(context, { teamId, role: 'viewer' });
+    await lead.post('/api/teams/chargers/digest/recipients').send({ email: person.email }).expect(201);
+    await lead.delete(`/api/teams/chargers/members/${person.id}`).expect(204);
+    context.clock.set(Date.parse('2026-03-09T12:00:00Z'));
+    requestDueDigests(context, 'schedule');
+    await workDigest('one');
+    expect(mails().map(({ toEmail }) => toEmail)).not.toContain(person.email);
+  });
+
+  it('keep somebody who unsubscribed from being added by the way', async () => {
+    const app = createApp(context);
+    const { visitor: lead } = await signInAs(context, app, { teamId, role: 'lead' });
+    const add = () => lead.post('/api/teams/chargers/digest/recipients').send({ email: 'out@side.example' });
+    const { body } = await add().expect(201);
+    const [{ id }] = body.recipients.filter(({ email }: { email: string }) => email === 'out@side.example');
+    const [recipient] = listReaders(context.db, teamId).filter((one) => one.id === id);
+    await request(app).post(`/api/digest/unsubscribe/${recipient?.unsubscribeSecret}`).expect(200);
+    expect((await add().expect(409)).body.detail).toContain('unsubscribed');
+    await lead.delete(`/api/teams/chargers/digest/recipients/${id}`).expect(204);
+    await add().expect(201);
   });
 });
