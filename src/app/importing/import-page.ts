@@ -52,6 +52,10 @@ export class ImportPage implements HoldsUnsaved {
 
   /** Key of the team, from the address. */
   readonly team = input.required<string>();
+  /** What a link from a product or a build fills in, from the address. */
+  readonly product = input<string>();
+  readonly hardware = input<string>();
+  readonly firmware = input<string>();
 
   protected readonly form = tagsForm();
   protected readonly content = toSignal(this.form.valueChanges.pipe(map(() => this.form.getRawValue())), {
@@ -83,6 +87,12 @@ export class ImportPage implements HoldsUnsaved {
   constructor() {
     effect(() => this.catalogue.look(this.team(), this.content().product));
     effect(() => this.chooseOnlyOnes());
+    effect(() => this.fillFromAddress());
+  }
+
+  private fillFromAddress(): void {
+    const [product, hardware, firmware] = [this.product(), this.hardware(), this.firmware()];
+    this.form.patchValue({ ...(product && { product }), ...(hardware && { hardware }), ...(firmware && { firmware }) });
   }
 
   unsaved(): string | null {

@@ -33,7 +33,7 @@ export function marginMapOption({
   const places = ticks.map(({ at }) => at);
   return {
     animation: false,
-    grid: { ...MARGIN_MAP_MARGINS, containLabel: false },
+    grid: { ...MARGIN_MAP_MARGINS, containLabel: false, outerBoundsMode: 'none' },
     xAxis: buildAxis(builds, range, plotPx, palette),
     yAxis: {
       ...look,

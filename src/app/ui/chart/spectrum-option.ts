@@ -20,7 +20,7 @@ export function spectrumOption(scene: SpectrumScene): EChartsCoreOption {
   const look = axisLook(palette);
   return {
     animation: false,
-    grid: { ...spectrumMargins(scene.marks.length > 0), containLabel: false },
+    grid: { ...spectrumMargins(scene.marks.length > 0), containLabel: false, outerBoundsMode: 'none' },
     xAxis: frequencyAxis(range, palette),
     yAxis: {
       ...look,

@@ -42,7 +42,7 @@ export function trendOption(scene: TrendScene): EChartsCoreOption {
   const looks = trendLooks(series, palette);
   return {
     animation: false,
-    grid: { ...TREND_MARGINS, containLabel: false },
+    grid: { ...TREND_MARGINS, containLabel: false, outerBoundsMode: 'none' },
     xAxis: buildAxis(builds, range, plotPx, palette),
     yAxis: {
       ...look,
