@@ -1,6 +1,7 @@
 import { OPEN_DROP_STATES } from '@shared/contracts/drops';
 import { and, asc, count, desc, eq, gt, gte, inArray, max, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
+import { prepared } from '../db/prepared';
 import { builds, drops, firmwareRevisions, hardwareRevisions, products } from '../db/schema';
 
 export type Build = typeof builds.$inferSelect;
@@ -39,17 +40,25 @@ export function findNamedBuild(db: Database, productId: number, buildId: number)
     .get();
 }
 
+const byRevisions = prepared((db) =>
+  namedBuilds(db)
+    .where(
+      and(
+        eq(builds.productId, sql.placeholder('productId')),
+        eq(hardwareRevisions.name, sql.placeholder('hardware')),
+        eq(firmwareRevisions.name, sql.placeholder('firmware')),
+      ),
+    )
+    .prepare(),
+);
+
 export function findBuildByRevisions(
   db: Database,
   productId: number,
   hardware: string,
   firmware: string,
 ): NamedBuild | undefined {
-  return namedBuilds(db)
-    .where(
-      and(eq(builds.productId, productId), eq(hardwareRevisions.name, hardware), eq(firmwareRevisions.name, firmware)),
-    )
-    .get();
+  return byRevisions(db).get({ productId, hardware, firmware });
 }
 
 /** The first position whose build is younger than `builtAt`, or one past the last. */

@@ -1,5 +1,6 @@
 import { and, asc, eq, gt, gte, isNotNull, isNull, or, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
+import { prepared } from '../db/prepared';
 import { builds, firmwareRevisions, hardwareRevisions, products, teams } from '../db/schema';
 
 /**
@@ -11,12 +12,23 @@ const isStale = and(
   or(gt(builds.sweepCount, 0), isNotNull(builds.judgedAt)),
 );
 
+const versionRaise = prepared((db) =>
+  db
+    .update(builds)
+    .set({ dataVersion: sql`${builds.dataVersion} + 1` })
+    .where(
+      and(
+        eq(builds.productId, sql.placeholder('productId')),
+        gte(builds.position, sql.placeholder('fromPosition')),
+        gt(builds.sweepCount, 0),
+      ),
+    )
+    .prepare(),
+);
+
 /** Raises the data version of the product's measured builds at and after the position. */
 export function raiseDataVersions(db: Database, productId: number, fromPosition: number): void {
-  db.update(builds)
-    .set({ dataVersion: sql`${builds.dataVersion} + 1` })
-    .where(and(eq(builds.productId, productId), gte(builds.position, fromPosition), gt(builds.sweepCount, 0)))
-    .run();
+  versionRaise(db).run({ productId, fromPosition });
 }
 
 /** Stale builds of a product, oldest first. */

@@ -1,5 +1,6 @@
-import { and, asc, count, desc, eq, inArray, isNull, or } from 'drizzle-orm';
+import { and, asc, count, desc, eq, inArray, isNull, or, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
+import { prepared } from '../db/prepared';
 import { people, products, productShares, referenceChoices, sweeps, teams, verdicts } from '../db/schema';
 
 export type Product = typeof products.$inferSelect;
@@ -10,8 +11,9 @@ export interface ProductOfTeam {
   team: Team;
 }
 
-function reachableBy(db: Database, teamIds: readonly number[]) {
-  const ids = [...teamIds];
+/** Of the placeholder `teamIds`, a JSON array: one statement serves any number of teams. */
+function isReachable(db: Database) {
+  const ids = sql`(select value from json_each(${sql.placeholder('teamIds')}))`;
   const shared = db
     .select({ id: productShares.productId })
     .from(productShares)
@@ -23,19 +25,27 @@ function productsOfTeams(db: Database) {
   return db.select({ product: products, team: teams }).from(products).innerJoin(teams, eq(teams.id, products.teamId));
 }
 
+const reachableByKey = prepared((db) =>
+  productsOfTeams(db)
+    .where(and(eq(products.key, sql.placeholder('key')), isReachable(db)))
+    .prepare(),
+);
+
 /** Products with this key that belong to one of the teams or are shared with one of them, archived ones too. */
 export function findReachableProducts(db: Database, key: string, teamIds: readonly number[]): ProductOfTeam[] {
-  return productsOfTeams(db)
-    .where(and(eq(products.key, key), reachableBy(db, teamIds)))
-    .all();
+  return reachableByKey(db).all({ key, teamIds: JSON.stringify(teamIds) });
 }
+
+const reachableInUse = prepared((db) =>
+  productsOfTeams(db)
+    .where(and(isReachable(db), isNull(products.archivedAt)))
+    .orderBy(asc(products.name))
+    .prepare(),
+);
 
 /** Products that belong to one of the teams or are shared with one of them, by name. */
 export function listReachableProducts(db: Database, teamIds: readonly number[]): ProductOfTeam[] {
-  return productsOfTeams(db)
-    .where(and(reachableBy(db, teamIds), isNull(products.archivedAt)))
-    .orderBy(asc(products.name))
-    .all();
+  return reachableInUse(db).all({ teamIds: JSON.stringify(teamIds) });
 }
 
 export function findProductById(db: Database, id: number): Product | undefined {

@@ -1,5 +1,6 @@
-import { and, asc, eq, max } from 'drizzle-orm';
+import { and, asc, eq, max, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
+import { prepared } from '../db/prepared';
 import { operatingStates, units } from '../db/schema';
 
 export type OperatingState = typeof operatingStates.$inferSelect;
@@ -15,12 +16,21 @@ export function listStates(db: Database, productId: number): OperatingState[] {
     .all();
 }
 
-export function findStateByName(db: Database, productId: number, name: string): OperatingState | undefined {
-  return db
+const stateByName = prepared((db) =>
+  db
     .select()
     .from(operatingStates)
-    .where(and(eq(operatingStates.productId, productId), eq(operatingStates.name, name)))
-    .get();
+    .where(
+      and(
+        eq(operatingStates.productId, sql.placeholder('productId')),
+        eq(operatingStates.name, sql.placeholder('name')),
+      ),
+    )
+    .prepare(),
+);
+
+export function findStateByName(db: Database, productId: number, name: string): OperatingState | undefined {
+  return stateByName(db).get({ productId, name });
 }
 
 export function insertState(
@@ -52,12 +62,16 @@ export function listUnits(db: Database, productId: number): Unit[] {
   return db.select().from(units).where(eq(units.productId, productId)).orderBy(asc(units.serial)).all();
 }
 
-/** The unit with this serial number, made if there is none. */
-export function findOrInsertUnit(db: Database, productId: number, serial: string, createdAt: number): Unit {
-  const found = db
+const unitBySerial = prepared((db) =>
+  db
     .select()
     .from(units)
-    .where(and(eq(units.productId, productId), eq(units.serial, serial)))
-    .get();
+    .where(and(eq(units.productId, sql.placeholder('productId')), eq(units.serial, sql.placeholder('serial'))))
+    .prepare(),
+);
+
+/** The unit with this serial number, made if there is none. */
+export function findOrInsertUnit(db: Database, productId: number, serial: string, createdAt: number): Unit {
+  const found = unitBySerial(db).get({ productId, serial });
   return found ?? db.insert(units).values({ productId, serial, createdAt }).returning().get();
 }

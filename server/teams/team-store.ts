@@ -1,5 +1,6 @@
-import { asc, count, eq, inArray } from 'drizzle-orm';
+import { asc, count, eq, inArray, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
+import { prepared } from '../db/prepared';
 import { memberships, products, teams } from '../db/schema';
 
 export type Team = typeof teams.$inferSelect;
@@ -8,8 +9,16 @@ export function findTeamByKey(db: Database, key: string): Team | undefined {
   return db.select().from(teams).where(eq(teams.key, key)).get();
 }
 
+const byId = prepared((db) =>
+  db
+    .select()
+    .from(teams)
+    .where(eq(teams.id, sql.placeholder('id')))
+    .prepare(),
+);
+
 export function findTeamById(db: Database, id: number): Team | undefined {
-  return db.select().from(teams).where(eq(teams.id, id)).get();
+  return byId(db).get({ id });
 }
 
 /** By name. */

@@ -1,11 +1,20 @@
-import { desc, eq, isNull } from 'drizzle-orm';
+import { desc, eq, isNull, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
+import { prepared } from '../db/prepared';
 import { people, teamTokens } from '../db/schema';
 
 export type TeamToken = typeof teamTokens.$inferSelect;
 
+const byId = prepared((db) =>
+  db
+    .select()
+    .from(teamTokens)
+    .where(eq(teamTokens.id, sql.placeholder('id')))
+    .prepare(),
+);
+
 export function findToken(db: Database, id: number): TeamToken | undefined {
-  return db.select().from(teamTokens).where(eq(teamTokens.id, id)).get();
+  return byId(db).get({ id });
 }
 
 export function insertToken(db: Database, token: typeof teamTokens.$inferInsert): TeamToken {
