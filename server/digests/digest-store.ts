@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, inArray, isNull, like, notLike, or, sql } from 'drizzle-orm';
+import { and, asc, desc, eq, inArray, isNull, like, or, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
 import { digestRecipients, digests, digestSettings, memberships, outboxMails, people, teams } from '../db/schema';
 
@@ -96,10 +96,9 @@ export function findDigest(db: Database, teamId: number, period: string): Digest
     .get();
 }
 
-/** The last digests of a team, newest first, without those asked for by hand. */
+/** The last digests of a team, newest first, those asked for by hand too. */
 export function listDigests(db: Database, teamId: number, limit: number): Digest[] {
-  const weekly = and(eq(digests.teamId, teamId), notLike(digests.period, 'now-%'));
-  return db.select().from(digests).where(weekly).orderBy(desc(digests.id)).limit(limit).all();
+  return db.select().from(digests).where(eq(digests.teamId, teamId)).orderBy(desc(digests.id)).limit(limit).all();
 }
 
 /** How many mails of a digest are in which state. */

@@ -183,7 +183,7 @@ describe('digest settings', () => {
     await workDigest('one');
     expect(mails().map(({ toEmail }) => toEmail)).toEqual([actor.email]);
     const { body } = await visitor.get('/api/teams/chargers/digest').expect(200);
-    expect(body).toMatchObject({ mine: false, sent: [] });
+    expect(body).toMatchObject({ mine: false, sent: [{ waiting: 1 }] });
   });
 
   it('end the digest of a member a lead added with the membership', async () => {
