@@ -55,8 +55,13 @@ export class OriginalFiles {
     return bytes;
   }
 
-  remove(hash: string): void {
-    rmSync(this.pathOf(hash), { force: true });
+  /** Removes the file unless it was kept again since the moment. Returns whether it did. */
+  removeKeptBefore(hash: string, at: number): boolean {
+    const path = this.pathOf(hash);
+    const file = statSync(path, { throwIfNoEntry: false });
+    if (file === undefined || file.mtimeMs >= at) return false;
+    rmSync(path, { force: true });
+    return true;
   }
 
   /** SHA-256 of every file that was last kept before the moment; broken-off writes from before it are removed on the way. */
