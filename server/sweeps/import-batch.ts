@@ -3,6 +3,7 @@ import { SweepTags } from '@shared/contracts/sweeps';
 import * as z from 'zod';
 import { personActor } from '../accounts/person-actor';
 import type { Context } from '../context';
+import { isStorageFault } from '../db/is-storage-fault';
 import { withTransaction } from '../db/with-transaction';
 import { problemOf } from '../http/problem-of';
 import type { HeldRun } from '../queue/held-run';
@@ -55,6 +56,7 @@ function importItem(context: Context, batch: ImportBatch, item: ImportItem): Out
       return settleItem(context.db, item.id, { status: outcome, sweepId }) ? outcome : 'taken';
     });
   } catch (error) {
+    // The run fails and the item waits for the next one.
     if (isStorageFault(error)) throw error;
     const isExpected = error instanceof ServiceError || error instanceof z.ZodError;
     if (!isExpected) context.log.error({ err: error, item: item.id }, 'could not import a file of a batch');
@@ -69,9 +71,4 @@ function importerOf(context: Context, batch: ImportBatch) {
     throw new ServiceError('forbidden', 'the person who handed these files over has no account any more');
   }
   return person;
-}
-
-/** A database that is locked or full says nothing about the file: the run fails and the item waits for the next one. */
-function isStorageFault(error: unknown): boolean {
-  return error instanceof Error && 'code' in error && /^SQLITE_(?!CONSTRAINT)/.test(String(error.code));
 }

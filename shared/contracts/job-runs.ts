@@ -1,6 +1,6 @@
 import * as z from 'zod';
 
-export const JOB_NAMES = ['judge', 'import', 'digest', 'mail', 'prune'] as const;
+export const JOB_NAMES = ['judge', 'import', 'remeasure', 'digest', 'mail', 'prune'] as const;
 export type JobName = (typeof JOB_NAMES)[number];
 export const JOB_STATUSES = ['waiting', 'running', 'done', 'failed'] as const;
 export const JOB_TRIGGERS = ['schedule', 'start', 'person', 'token', 'import'] as const;

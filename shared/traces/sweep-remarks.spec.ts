@@ -1,5 +1,5 @@
 import type { BandMargin } from './margins';
-import { remarksOnBands, remarksOnSettings, scallopingLossDb } from './sweep-remarks';
+import { refreshBandRemarks, remarksOnBands, remarksOnSettings, scallopingLossDb } from './sweep-remarks';
 
 const grid = { pointCount: 6634, startHz: 150e3, stopHz: 30e6, medianStepHz: 4500 };
 const band: BandMargin = {
@@ -59,5 +59,17 @@ describe('remarksOnBands', () => {
     expect(remarksOnBands([{ ...band, floorMarginDb: 6 }])).toEqual([]);
     expect(remarksOnBands([{ ...band, floorMarginDb: 5.9 }])[0]?.text).toContain('only 5.9 dB below the limit');
     expect(remarksOnBands([{ ...band, floorMarginDb: -2 }])[0]?.text).toContain('2.0 dB above the limit');
+  });
+});
+
+describe('refreshBandRemarks', () => {
+  it('replaces what is said of bands and leaves the rest', () => {
+    const uncorrected = { code: 'uncorrected', text: 'levels are uncorrected readings' };
+    const old = { code: 'notCovered', text: 'Radio 0.5-1.6 MHz: not measured' };
+    expect(refreshBandRemarks([old, uncorrected], [band])).toEqual([uncorrected]);
+    expect(refreshBandRemarks([uncorrected], [{ ...band, worst: null }])).toEqual([
+      uncorrected,
+      { code: 'notCovered', text: '0.15-0.5 MHz: not measured' },
+    ]);
   });
 });

@@ -79,3 +79,10 @@ export function remarksOnBands(bands: readonly BandMargin[]): SweepRemark[] {
     return remarks;
   });
 }
+
+const BAND_CODES = new Set(['notCovered', 'partlyCovered', 'floorNearLimit']);
+
+/** Remarks of a sweep whose bands were measured anew: those on the bands are replaced, all others stay. */
+export function refreshBandRemarks(remarks: readonly SweepRemark[], bands: readonly BandMargin[]): SweepRemark[] {
+  return [...remarks.filter(({ code }) => !BAND_CODES.has(code)), ...remarksOnBands(bands)];
+}
