@@ -3,6 +3,7 @@ import { createApp } from './app';
 import { readConfig } from './config/read-config';
 import { createContext } from './context';
 import { migrate } from './db/migrate';
+import { refuseDemoInProduction } from './demo/refuse-demo';
 import { seedDemoIfEmpty } from './demo/seed-demo';
 import { listen } from './listen';
 import { openMailbox } from './mail/open-mailbox';
@@ -12,6 +13,7 @@ await orExplain(async () => {
   const config = readConfig(process.env);
   const context = createContext(config, 'server');
   migrate(context.db);
+  refuseDemoInProduction(context);
   const mailbox = await openMailbox(context);
   if (config.seedsDemo) await seedDemoIfEmpty(context);
   const { server, url } = await listen(createApp(context), config.port, config.host);
