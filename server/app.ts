@@ -76,6 +76,7 @@ export function createApp(context: Context): Express {
   );
   app.use(
     compression({
+      threshold: SMALL_ANSWER_BYTES,
       filter: (request, response) =>
         isText(response.getHeader('content-type')) && compression.filter(request, response),
     }),
@@ -136,6 +137,9 @@ function contentPolicy(): Record<string, string[] | null> {
     'upgrade-insecure-requests': null,
   };
 }
+
+/** An answer up to this fits into the first packets of a connection; a compressor for it costs more than the answer. */
+const SMALL_ANSWER_BYTES = 8 * 1024;
 
 /** Level traces do not shrink under gzip and cost a hundred times their reading. */
 function isText(contentType: unknown): boolean {
