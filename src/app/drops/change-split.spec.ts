@@ -23,10 +23,10 @@ it('says so when the point stayed where it was', () => {
     fromHz: 1.2e6,
     toHz: 1.2e6,
     levelChangeDb: 3,
-    limitChangeDb: 0,
+    limitChangeDb: 0.04,
   });
   expect(level.text).toBe('The level at the worst point rose by 3.0 dB at 1.2 MHz.');
-  expect(limit).toEqual({ what: 'limit', marginChangeDb: 0, text: 'The limit is the same at both.' });
+  expect(limit).toEqual({ what: 'limit', marginChangeDb: 0.04, text: 'The limit is the same at both.' });
 });
 
 it('names a fall that a lower limit outweighed', () => {

@@ -13,10 +13,9 @@ export interface ChangePart {
 export function changeSplit({ moved, fromHz, toHz, levelChangeDb, limitChangeDb }: PointMove): ChangePart[] {
   const way = `from ${formatFrequency(fromHz)} to ${formatFrequency(toHz)}`;
   const level = `The level at the worst point ${rise(levelChangeDb)}${moved ? `, going ${way}` : ` at ${formatFrequency(toHz)}`}.`;
-  const limit =
-    limitChangeDb === 0
-      ? 'The limit is the same at both.'
-      : `The limit is ${formatDecibels(Math.abs(limitChangeDb))} ${limitChangeDb > 0 ? 'higher' : 'lower'} there.`;
+  const limit = isNothing(limitChangeDb)
+    ? 'The limit is the same at both.'
+    : `The limit is ${formatDecibels(Math.abs(limitChangeDb))} ${limitChangeDb > 0 ? 'higher' : 'lower'} there.`;
   return [
     { what: 'level', marginChangeDb: -levelChangeDb, text: level },
     { what: 'limit', marginChangeDb: limitChangeDb, text: limit },
@@ -24,6 +23,11 @@ export function changeSplit({ moved, fromHz, toHz, levelChangeDb, limitChangeDb 
 }
 
 function rise(levelChangeDb: number): string {
-  if (levelChangeDb === 0) return 'is the same';
+  if (isNothing(levelChangeDb)) return 'is the same';
   return `${levelChangeDb > 0 ? 'rose' : 'fell'} by ${formatDecibels(Math.abs(levelChangeDb))}`;
+}
+
+/** Less than the 0.1 dB that results are written with. */
+function isNothing(changeDb: number): boolean {
+  return Math.abs(changeDb) < 0.05;
 }

@@ -6,7 +6,7 @@ import { TimeStamp } from '../ui/time-stamp';
 import { VerdictChip } from '../ui/verdict-chip';
 import { DropStateChip } from './drop-state-chip';
 import { ownerQuery } from './owner-query';
-import { sightingWords } from './sighting-words';
+import { isOverNow, sightingWords } from './sighting-words';
 
 /** What dropped, in one sentence, and which build, state and band it is about. */
 @Component({
@@ -26,7 +26,7 @@ import { sightingWords } from './sighting-words';
     </p>
     <h1>{{ drop.sentence }}</h1>
     <div class="foot">
-      <app-verdict-chip verdict="lost" [isOverLimit]="drop.latest.isOverLimit" />
+      <app-verdict-chip verdict="lost" [isOverLimit]="isOverNow()" />
       <app-drop-state-chip [state]="drop.state" />
       <span class="muted">
         raised <app-time [at]="drop.createdAt" />
@@ -96,5 +96,6 @@ export class DropHead {
   readonly teamKey = input.required<string>();
 
   protected readonly owner = computed(() => ownerQuery(this.drop(), this.teamKey()));
+  protected readonly isOverNow = computed(() => isOverNow(this.drop()));
   protected readonly elsewhere = computed(() => sightingWords(this.drop()));
 }

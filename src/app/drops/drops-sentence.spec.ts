@@ -3,7 +3,7 @@ import { dropsSentence } from './drops-sentence';
 
 const OPEN = { state: 'open', product: null, owner: null };
 const drop = (isOverLimit: boolean, isOwned: boolean) =>
-  ({ latest: { isOverLimit }, owner: isOwned ? { id: 3, name: 'Ivo' } : null }) as DropSummary;
+  ({ latest: { isOverLimit }, noLongerSeenIn: null, owner: isOwned ? { id: 3, name: 'Ivo' } : null }) as DropSummary;
 
 it.each([
   [[], 'No drop is open.'],
@@ -22,4 +22,9 @@ it('does not ask for an owner of drops that are closed', () => {
   expect(dropsSentence([drop(false, false), drop(true, false)], { ...OPEN, state: 'fixed' })).toBe(
     '2 drops, 1 of them over the limit.',
   );
+});
+
+it('does not call a drop over the limit once the margin is back', () => {
+  const back = { ...drop(true, true), noLongerSeenIn: { id: 19, hardware: 'C3', firmware: '4.2.1' } };
+  expect(dropsSentence([back], { ...OPEN, state: 'all' })).toBe('1 drop.');
 });

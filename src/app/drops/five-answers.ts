@@ -5,7 +5,7 @@ import { formatFrequency } from '@shared/units/format-frequency';
 import { formatChance } from './format-chance';
 import { leadWitness } from './lead-witness';
 import { marginWords, targetWords } from './margin-words';
-import { buildName } from './sighting-words';
+import { buildName, standingWords } from './sighting-words';
 
 export const QUESTIONS = [
   { id: 'real', question: 'Is it real?' },
@@ -56,18 +56,19 @@ function whereAnswer(drop: DropView): Words {
 /** What is left now: in the newest build that shows the loss, which need not be the one that raised the drop. */
 function leftAnswer(drop: DropView): Words {
   const { latest, noLongerSeenIn, evidence } = drop;
-  const where = latest.buildId === drop.buildId ? '' : ` in ${buildName(latest)}`;
-  const back = noLongerSeenIn === null ? '' : `; back in ${buildName(noLongerSeenIn)}`;
+  if (noLongerSeenIn !== null) {
+    return { short: standingWords(drop), more: `${capital(marginWords(latest.marginDb))} in ${buildName(latest)}` };
+  }
   return {
-    short: `${capital(marginWords(latest.marginDb))}${where}`,
-    more: `${capital(targetWords(latest.marginDb, evidence.targetMarginDb))}${back}`,
+    short: latest.buildId === drop.buildId ? capital(marginWords(latest.marginDb)) : standingWords(drop),
+    more: capital(targetWords(latest.marginDb, evidence.targetMarginDb)),
   };
 }
 
 function changedAnswer(drop: DropView): Words {
   const { changes } = drop.evidence;
-  // A switching frequency explains more than the name of a revision.
-  const first = changes.find(({ what }) => what.includes('switching frequency')) ?? changes[0];
+  // A switching frequency or its spreading explains more than the name of a revision.
+  const first = changes.find(({ what }) => /switching frequency|frequency spreading/.test(what)) ?? changes[0];
   if (first === undefined) return { short: 'Nothing was declared', more: `Build ${buildName(drop)}` };
   const others = changes.filter((change) => change !== first).map(({ what }) => what);
   return {

@@ -4,9 +4,9 @@ import type { DropView } from '@shared/contracts/drops';
 import { findLimitSet } from '@shared/limits/limit-sets';
 import { FrequencyPipe } from '../ui/frequency';
 import { leadWitness } from './lead-witness';
-import { marginWords, targetWords } from './margin-words';
+import { targetWords } from './margin-words';
 import { QuestionBlock } from './question-block';
-import { buildName } from './sighting-words';
+import { buildName, isOverNow, standingWords } from './sighting-words';
 import { SightingsTable } from './sightings-table';
 
 /** Margin to the limit and to the target, and what may be said of meeting the limit. */
@@ -17,8 +17,8 @@ import { SightingsTable } from './sightings-table';
   template: `
     @let judgement = this.lead();
     <app-question-block question="How much is left?">
-      <p class="margin" [class.over]="drop().latest.isOverLimit">
-        @if (drop().latest.isOverLimit) {
+      <p class="margin" [class.over]="isOver()">
+        @if (isOver()) {
           <mat-icon svgIcon="over" />
         }
         {{ left() }}
@@ -66,10 +66,8 @@ export class LeftBlock {
   readonly teamKey = input.required<string>();
 
   protected readonly lead = computed(() => leadWitness(this.drop()).judgement);
-  protected readonly left = computed(() => {
-    const words = marginWords(this.drop().latest.marginDb);
-    return `${words.charAt(0).toUpperCase()}${words.slice(1)} in ${buildName(this.drop().latest)}`;
-  });
+  protected readonly isOver = computed(() => isOverNow(this.drop()));
+  protected readonly left = computed(() => standingWords(this.drop()));
   protected readonly raisedIn = computed(() => buildName(this.drop()));
   protected readonly limit = computed(() => {
     const { limitSetKey, limitSetVersion } = this.drop().evidence;
@@ -78,16 +76,16 @@ export class LeftBlock {
   });
   protected readonly target = computed(() => {
     const { latest, evidence } = this.drop();
-    const words = targetWords(latest.marginDb, evidence.targetMarginDb);
-    return `${words.charAt(0).toUpperCase()}${words.slice(1)}.`;
+    return `${buildName(latest)}: ${targetWords(latest.marginDb, evidence.targetMarginDb)}.`;
   });
   protected readonly chance = computed(() => {
     const { pConform } = this.lead();
-    if (pConform !== null)
-      return `Chance that the product meets the limit here, by the team's own uncertainty: ${(100 * pConform).toFixed(0)} %.`;
+    if (pConform !== null) {
+      return `${this.raisedIn()}: chance of meeting the limit, by the team's own uncertainty, ${(100 * pConform).toFixed(0)} %.`;
+    }
     return (
-      `${this.drop().latest.isOverLimit ? 'The reading exceeds the limit' : 'The reading is below the limit'}. How likely the product meets it is ` +
-      `not stated, for the team has entered no measurement uncertainty; in-house results indicate, only an accredited test shows.`
+      'How likely the product meets the limit is not stated, for the team has entered no measurement uncertainty. ' +
+      'In-house results indicate; only an accredited test shows.'
     );
   });
 }
