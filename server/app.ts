@@ -1,11 +1,9 @@
 import compression from 'compression';
 import express, { type Express } from 'express';
-import session from 'express-session';
 import helmet from 'helmet';
 import { existsSync } from 'node:fs';
 import type { ServerResponse } from 'node:http';
 import { resolve } from 'node:path';
-import passport from 'passport';
 import { pinoHttp } from 'pino-http';
 import { accountRoutes } from './accounts/account-routes';
 import { auditRoutes } from './audit/audit-routes';
@@ -20,7 +18,6 @@ import { healthRoutes } from './http/health-routes';
 import { identify } from './http/identify';
 import { loggableUrl } from './http/loggable-url';
 import { openapiRoutes } from './http/openapi-routes';
-import { SESSION_MS, SessionStore } from './http/session-store';
 import { judgingRoutes } from './judging/judging-routes';
 import { limitRoutes } from './limits/limit-routes';
 import { mailboxRoutes } from './mail/mailbox-routes';
@@ -83,7 +80,7 @@ export function createApp(context: Context): Express {
   );
 
   app.use('/api', keepToTheCaller, healthRoutes(context), unsubscribeRoutes(context), express.json({ limit: '256kb' }));
-  app.use('/api', sessionOf(context), passport.session() as express.RequestHandler, identify(context), guardCrossSite);
+  app.use('/api', identify(context), guardCrossSite);
   for (const routes of FEATURES) app.use('/api', routes(context));
   app.use('/api', (request) => {
     throw new ServiceError('notFound', `there is no ${request.method} ${request.originalUrl}`);
@@ -108,18 +105,6 @@ const keepToTheCaller: express.RequestHandler = (_request, response, next) => {
   response.set('cache-control', 'private, no-cache');
   next();
 };
-
-function sessionOf(context: Context): express.RequestHandler {
-  return session({
-    store: new SessionStore(context.db, context.now),
-    name: 'strandline',
-    secret: context.config.sessionSecret,
-    resave: false,
-    saveUninitialized: false,
-    rolling: true,
-    cookie: { httpOnly: true, sameSite: 'lax', secure: 'auto', maxAge: SESSION_MS },
-  });
-}
 
 /** No inline script anywhere; styles inline because Angular writes component styles into the page. */
 function contentPolicy(): Record<string, string[] | null> {

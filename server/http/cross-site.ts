@@ -8,14 +8,15 @@ const { csrfSynchronisedProtection, generateToken } = csrfSync({
   errorConfig: { statusCode: 403, message: 'the page is out of date: reload it and try again', code: 'forbidden' },
 });
 
-/** Puts a fresh token where the pages pick it up; needed after every change of the session. */
+/** Puts a fresh token where the pages pick it up; needed after every change of the session. A team token needs none. */
 export function issueCrossSiteToken(request: Request, response: Response): void {
+  if (isByToken(request)) return;
   response.cookie('XSRF-TOKEN', generateToken(request, true), { sameSite: 'lax', secure: request.secure, path: '/' });
 }
 
 /** Refuses a change made with the session cookie but without its token. A team token is no cookie and needs none. */
 export const guardCrossSite: RequestHandler = (request, response, next) => {
-  if (actorIfAny(request)?.kind === 'token') {
+  if (isByToken(request)) {
     next();
     return;
   }
@@ -24,3 +25,8 @@ export const guardCrossSite: RequestHandler = (request, response, next) => {
     else next(new ServiceError('forbidden', 'the page is out of date: reload it and try again'));
   });
 };
+
+/** Whether a team token makes the request, which then has no session (identify.ts). */
+export function isByToken(request: Request): boolean {
+  return actorIfAny(request)?.kind === 'token';
+}

@@ -2,7 +2,7 @@ import type { Express } from 'express';
 import request from 'supertest';
 import { createApp } from '../../server/app';
 import { teamTokens } from '../../server/db/schema';
-import { buildTeam } from '../builders/team-builder';
+import { buildTeam, TEST_PASSWORD } from '../builders/team-builder';
 import { signInAs, type Visitor } from '../support/sign-in';
 import { createTestContext, type TestContext } from '../support/test-context';
 
@@ -54,6 +54,22 @@ describe('a team token', () => {
     expect(answer.status).toBe(403);
     expect(answer.body.detail).toContain('scope');
     expect(answer.headers['set-cookie']).toBeUndefined();
+  });
+
+  it('counts instead of the session beside it, which it neither reads, renews nor ends', async () => {
+    const { token } = await make(['results:read']);
+    const bearer = `Bearer ${token}`;
+    const answer = await lead
+      .patch('/api/teams/drives')
+      .set('authorization', bearer)
+      .send({ name: 'Mine' })
+      .expect(403);
+    expect(answer.headers['set-cookie']).toBeUndefined();
+    await lead.delete('/api/session').set('authorization', bearer).expect(204);
+    const { actor, visitor } = await signInAs(context, app);
+    const credentials = { email: actor.email, password: TEST_PASSWORD };
+    await visitor.post('/api/session').set('authorization', bearer).send(credentials).expect(400);
+    expect((await lead.get('/api/session').expect(200)).body.person.name).toBe('Ada Vane');
   });
 
   it('ends when revoked, and stays on the list with the time', async () => {
