@@ -66,7 +66,7 @@ describe('two processes that import the same files at once', () => {
     );
     expect(db.$client.pragma('foreign_key_check')).toEqual([]);
     const files = readdirSync(context.config.originalsDir, { recursive: true, withFileTypes: true });
-    expect(files.filter((entry) => entry.isFile()).map(({ name }) => name.endsWith('.gz'))).toEqual(
+    expect(files.filter((entry) => entry.isFile()).map(({ name }) => name.endsWith('.br'))).toEqual(
       new Array(FILES).fill(true),
     );
   }, 60_000);
