@@ -2,7 +2,7 @@ import { DropMove, DropNote, DropOwner, DropQuery } from '@shared/contracts/drop
 import { Router } from 'express';
 import type { Context } from '../context';
 import { actorOf } from '../http/actor-of';
-import { pathId, pathText, queryTeam } from '../http/route-parameters';
+import { pathId, pathText, queryOf, queryTeam } from '../http/route-parameters';
 import { findProduct } from '../products/find-product';
 import { findTeam } from '../teams/find-team';
 import { assignDrop } from './assign-drop';
@@ -19,14 +19,14 @@ export function dropRoutes(context: Context): Router {
   router.get('/v1/products/:key/drops', (request, response) => {
     const actor = actorOf(request);
     const { product } = findProduct(context, actor, pathText(request, 'key'), queryTeam(request), 'results.read');
-    const drops = findDrops(context, actor, { productId: product.id }, DropQuery.parse(request.query));
+    const drops = findDrops(context, actor, { productId: product.id }, queryOf(request, DropQuery));
     response.json(drops.map(presentDropSummary));
   });
 
   router.get('/teams/:team/drops', (request, response) => {
     const actor = actorOf(request);
     const team = findTeam(context, actor, pathText(request, 'team'), 'results.read');
-    const drops = findDrops(context, actor, { teamId: team.id }, DropQuery.parse(request.query));
+    const drops = findDrops(context, actor, { teamId: team.id }, queryOf(request, DropQuery));
     response.json(drops.map(presentDropSummary));
   });
 

@@ -82,6 +82,8 @@ export const DropSummary = z
     sentence: z.string(),
     /** Newest build that shows the loss: what is left now. The margin of the build that raised the drop stands beside it. */
     latest: DropSighting,
+    /** Every build that shows the loss, the drop's own among them, oldest first. */
+    seenIn: z.array(DropSighting),
     /** First build after `latest` whose margin is back. */
     noLongerSeenIn: z.object({ id: z.int(), hardware: z.string(), firmware: z.string() }).nullable(),
     createdAt: z.string(),
@@ -95,8 +97,6 @@ export const DropView = DropSummary.extend({
   evidence: z.custom<DropEvidence>().meta({ type: 'object', description: 'what it was judged on, frozen' }),
   buildSwitching: z.array(SwitchingStage),
   remarks: z.array(Remark),
-  /** Every build that shows the loss, the drop's own among them, oldest first. */
-  seenIn: z.array(DropSighting),
   fixedBy: z.object({ id: z.int(), hardware: z.string(), firmware: z.string() }).nullable(),
   history: z.array(z.object({ at: z.string(), actor: z.string(), kind: z.enum(DROP_EVENT_KINDS), text: z.string() })),
   /** States this caller may move the drop to. */

@@ -10,6 +10,7 @@ import { keptValue } from '../kept-value';
 import { problemOfResource } from '../problem-of-resource';
 import { ProductInView } from '../product-in-view';
 import type { ComparedBuild } from './changes-table';
+import { dropsShownBy } from './drops-shown-by';
 
 /** Everything a page says about the build of the address. */
 @Injectable()
@@ -39,10 +40,10 @@ export class BuildInView {
     params: this.product.apiTeam(),
   }));
   private readonly drops = keptValue(this.dropsAnswer);
-  /** Drops of this build that the data still support, in the order of the list: the gravest first. */
-  readonly ownDrops = computed(() =>
-    this.drops()?.filter(({ buildId, state }) => buildId === this.id() && state !== 'withdrawn'),
-  );
+  readonly shownDrops = computed(() => {
+    const drops = this.drops();
+    return drops && dropsShownBy(drops, this.id());
+  });
 
   private readonly sweepsAnswer = httpResource<SweepPage>(() => ({
     url: '/api/v1/sweeps',

@@ -57,7 +57,7 @@ export class BuildPage {
   });
   protected readonly targetMarginDb = computed(() => this.view.product()?.targetMarginDb ?? 0);
   protected readonly answer = computed(() => {
-    const [build, judged, drops] = [this.page.build(), this.page.judged(), this.page.ownDrops()];
+    const [build, judged, drops] = [this.page.build(), this.page.judged(), this.page.shownDrops()];
     return build && judged && drops && judged.buildId === build.id ? buildAnswer(build, judged, drops) : undefined;
   });
   protected readonly marginWords = computed(() => {
