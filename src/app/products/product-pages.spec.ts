@@ -306,13 +306,15 @@ describe('the page of a build', () => {
     next: { id: 3, hardware: 'C2', firmware: '1.2' },
   };
 
-  it('opens with the answer, leads to its neighbours, and names its own drops only', async () => {
+  it('opens with the answer, leads to its neighbours, and names the drops it shows only', async () => {
     const opened = await open('/t/charging/products/charger-750/builds/2');
     await opened.answer(API, product);
     await opened.answer(`${API}/builds/2`, build);
     await opened.answer(`${API}/verdicts`, { buildId: 2, verdicts: [], referenceBuilds: [], isStale: true });
-    const drop = { id: 1, buildId: 2, state: 'new', sentence: 'Mine.', witnesses: [], marginDb: 1, differenceDb: -4 };
-    await opened.answer(`${API}/drops`, [drop, { ...drop, id: 2, buildId: 3 }, { ...drop, id: 3, state: 'withdrawn' }]);
+    const seenIn = [{ buildId: 2, marginDb: 1, differenceDb: -4, isOverLimit: false }];
+    const drop = { id: 1, buildId: 2, state: 'new', sentence: 'Mine.', witnesses: [], seenIn };
+    const elsewhere = { ...drop, id: 2, buildId: 3, seenIn: [{ ...seenIn[0], buildId: 3 }] };
+    await opened.answer(`${API}/drops`, [drop, elsewhere, { ...drop, id: 3, state: 'withdrawn' }]);
     expect(text(opened)).toContain('Not judged yet');
     expect(text(opened)).toContain('One drop');
     const neighbours = [...opened.page.querySelectorAll('a[rel]')].map((link) => link.getAttribute('href'));
