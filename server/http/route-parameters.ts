@@ -1,4 +1,5 @@
 import type { Request } from 'express';
+import * as z from 'zod';
 import { ServiceError } from '../service-error';
 
 /** A text parameter of the path. */
@@ -20,4 +21,16 @@ export function pathId(request: Request, name: string): number {
 export function queryTeam(request: Request): string | undefined {
   const team = request.query['team'];
   return typeof team === 'string' && team !== '' ? team : undefined;
+}
+
+/**
+ * The query of an address. A word the schema does not know is refused: one misspelt would be taken for left out, and the
+ * answer be another than asked for. `team` is everybody's.
+ */
+export function queryOf<Shape extends z.ZodRawShape>(
+  request: Request,
+  schema: z.ZodObject<Shape>,
+): z.infer<z.ZodObject<Shape>> {
+  const { team, ...words } = request.query;
+  return z.strictObject(schema.shape).parse('team' in schema.shape ? { ...words, team } : words);
 }

@@ -3,7 +3,7 @@ import { BuildQuery, EvaluateQuery, GateQuery } from '@shared/contracts/judging'
 import { Router } from 'express';
 import type { Context } from '../context';
 import { actorOf } from '../http/actor-of';
-import { pathText, queryTeam } from '../http/route-parameters';
+import { pathText, queryOf, queryTeam } from '../http/route-parameters';
 import { findProduct } from '../products/find-product';
 import { presentRun } from '../queue/present-run';
 import { hasEnded, waitForRun } from '../queue/wait-for-run';
@@ -23,13 +23,13 @@ export function judgingRoutes(context: Context): Router {
   router.get('/v1/products/:key/verdicts', (request, response) => {
     const actor = actorOf(request);
     const { product } = findProduct(context, actor, pathText(request, 'key'), queryTeam(request), 'results.read');
-    response.json(viewVerdicts(context, product, BuildQuery.parse(request.query)));
+    response.json(viewVerdicts(context, product, queryOf(request, BuildQuery)));
   });
 
   router.post('/v1/products/:key/evaluate', async (request, response) => {
     const actor = actorOf(request);
     const { product } = findProduct(context, actor, pathText(request, 'key'), queryTeam(request), 'builds.evaluate');
-    const { wait } = EvaluateQuery.parse(request.query);
+    const { wait } = queryOf(request, EvaluateQuery);
     const asked = requestJudging(context, actor, product, actor.kind === 'token' ? 'token' : 'person');
     const run = wait === 'true' ? await waitForRun(context, asked.id, WAIT_AT_MOST_MS) : asked;
     response.status(hasEnded(run) ? 200 : 202).json(presentRun(run));
@@ -38,7 +38,7 @@ export function judgingRoutes(context: Context): Router {
   router.get('/v1/products/:key/gate', (request, response) => {
     const actor = actorOf(request);
     const found = findProduct(context, actor, pathText(request, 'key'), queryTeam(request), 'gate.read');
-    const { hardware, firmware, format, targetMarginDb: ownTargetDb } = GateQuery.parse(request.query);
+    const { hardware, firmware, format, targetMarginDb: ownTargetDb } = queryOf(request, GateQuery);
     const gate = decideBuildGate(context, found, { hardware, firmware }, ownTargetDb);
     const { key } = found.product;
     if (format === 'junit') {

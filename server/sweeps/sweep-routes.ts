@@ -2,7 +2,7 @@ import { OverlayQuery, SweepQuery, type SweepStored, SweepTags } from '@shared/c
 import { type RequestHandler, Router } from 'express';
 import type { Context } from '../context';
 import { actorOf } from '../http/actor-of';
-import { pathId, queryTeam } from '../http/route-parameters';
+import { pathId, queryOf, queryTeam } from '../http/route-parameters';
 import { findProduct } from '../products/find-product';
 import { findSweep, sweepById } from './find-sweep';
 import { frameSweeps } from './frame-sweeps';
@@ -30,7 +30,7 @@ export function sweepRoutes(context: Context): Router {
         .json(answer);
     })
     .get('/v1/sweeps', (request, response) => {
-      const { rows, nextBefore } = listSweeps(context, actorOf(request), SweepQuery.parse(request.query));
+      const { rows, nextBefore } = listSweeps(context, actorOf(request), queryOf(request, SweepQuery));
       response.json({ sweeps: rows.map(presentSweep), nextBefore });
     })
     .get('/v1/sweeps/:id', (request, response) => {
@@ -56,7 +56,7 @@ export function sweepRoutes(context: Context): Router {
       response.status(204).end();
     })
     .get('/v1/overlay', (request, response) => {
-      const query = OverlayQuery.parse(request.query);
+      const query = queryOf(request, OverlayQuery);
       const found = findProduct(context, actorOf(request), query.product, query.team, 'results.read');
       sendFrames(response, overlay(context, found, query));
     });

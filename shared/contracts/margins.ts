@@ -6,6 +6,7 @@ export const SeriesFilter = z.object({
   state: z.string().optional(),
   line: Line.optional(),
   detector: DetectorName.optional(),
+  limit: z.string().optional().describe("key of the product's limit set; another one is refused"),
 });
 export type SeriesFilter = z.infer<typeof SeriesFilter>;
 /** Query of the trend: a band on top. */

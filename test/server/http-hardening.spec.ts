@@ -114,6 +114,32 @@ describe('a change that changes nothing', () => {
   });
 });
 
+describe('a query', () => {
+  it.each([
+    '/api/v1/products/psu-240/trend',
+    '/api/v1/products/psu-240/margin-map',
+    '/api/v1/products/psu-240/drops',
+    '/api/v1/sweeps?product=psu-240',
+    '/api/v1/overlay?product=psu-240',
+    '/api/v1/products/psu-240/verdicts?hardware=A&firmware=1',
+    '/api/v1/products/psu-240/gate?hardware=A&firmware=1',
+  ])('with a word that %s does not know is refused, not answered as if it were not there', async (path) => {
+    await lead
+      .post('/api/v1/products/psu-240/builds')
+      .send({ hardware: 'A', firmware: '1', builtAt: '2026-01-01T00:00:00Z' });
+    const [address, query] = path.split('?');
+    await lead.get(`${address}?${query ?? ''}&team=chargers`).expect(200);
+    const { body } = await lead.get(`${address}?${query ?? ''}&detectr=AV`).expect(400);
+    expect(body.detail).toContain('detectr');
+  });
+
+  it('for another limit than the product’s is refused', async () => {
+    await lead.get('/api/v1/products/psu-240/trend?limit=CISPR32_B').expect(200);
+    const { body } = await lead.get('/api/v1/products/psu-240/margin-map?limit=CISPR32_A').expect(400);
+    expect(body.detail).toContain('CISPR32_B');
+  });
+});
+
 describe('the name of a file', () => {
   it.each([
     ['line breaks', 'a\r\nSet-Cookie: x=1.csv', 'aSet-Cookie: x=1.csv'],
