@@ -25,11 +25,12 @@ export function importRoutes(context: Context): Router {
   return Router()
     .post('/teams/:team/readings', requireAdder, uploadOne(context, 'file'), (request, response) => {
       const { buffer, originalname } = uploadedFile(request, 'file');
+      const { timeZone } = findTeam(context, actorOf(request), pathText(request, 'team'), 'sweeps.add');
       const reading = readFile(buffer, ReadingOptions.parse(jsonField(request, 'options', {})));
       if (wantsFrames(request)) {
         sendFrames(response, frameReading(reading));
       } else {
-        response.json(presentReading(reading, originalname, sha256(buffer)));
+        response.json(presentReading(reading, { fileName: originalname, sha256: sha256(buffer), timeZone }));
       }
     })
     .post('/teams/:team/imports', requireAdder, uploadMany(context, 'files'), (request, response) => {

@@ -17,6 +17,7 @@ export interface NamedBatch {
 export interface ItemResult {
   item: ImportItem;
   productKey: string | null;
+  productName: string | null;
   buildId: number | null;
   worstMarginDb: number | null;
 }
@@ -100,6 +101,7 @@ export function listItemResults(db: Database, batchId: number): ItemResult[] {
     .select({
       item: importItems,
       productKey: products.key,
+      productName: products.name,
       buildId: sweeps.buildId,
       worstMarginDb: sweeps.worstMarginDb,
     })

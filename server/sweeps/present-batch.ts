@@ -23,7 +23,7 @@ export function presentBatch({ batch, createdBy, counts, run, items }: BatchProg
   };
 }
 
-function presentItem({ item, productKey, buildId, worstMarginDb }: ItemResult): ImportBatchView['items'][number] {
+function presentItem({ item, ...result }: ItemResult): ImportBatchView['items'][number] {
   const { id, fileName, tags, status, sweepId, problem } = item;
-  return { id, fileName, tags, status, sweepId, productKey, buildId, worstMarginDb, problem };
+  return { id, fileName, tags, status, sweepId, ...result, problem };
 }

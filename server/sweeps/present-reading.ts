@@ -1,12 +1,22 @@
 import type { PreviewTrace, ReadingView } from '@shared/contracts/imports';
+import { momentOf } from '@shared/time/zoned-time';
 import type { Frames } from '@shared/traces/frames';
 import { describeGrid } from '@shared/traces/frequency-grid';
 import type { DelimitedReading } from '@shared/traces/read-delimited';
+import { type RecordedTime, recordedTime } from '@shared/traces/recorded-time';
 import { remarksOnSettings } from '@shared/traces/sweep-remarks';
 
+interface ReadFile {
+  fileName: string;
+  sha256: string;
+  /** Of the team, in which its instruments' clocks are taken to run. */
+  timeZone: string;
+}
+
 /** What a file holds, for the page that imports it. */
-export function presentReading(reading: DelimitedReading, fileName: string, sha256: string): ReadingView {
-  const { frequencyUnit, delimiter, decimalMark, settings, inferred } = reading;
+export function presentReading(reading: DelimitedReading, { fileName, sha256, timeZone }: ReadFile): ReadingView {
+  const { frequencyUnit, delimiter, decimalMark, settings, preamble } = reading;
+  const recorded = recordedTime(preamble);
   const grid = describeGrid(reading.frequenciesHz);
   const rbwHz = settings.rbwHz ?? null;
   return {
@@ -18,10 +28,22 @@ export function presentReading(reading: DelimitedReading, fileName: string, sha2
     decimalMark,
     rbwHz,
     attenuationDb: settings.attenuationDb ?? null,
+    preamble: [...preamble],
+    takenAt: recorded && momentOfRecording(recorded, timeZone),
     traces: presentTraces(reading),
-    inferred: [...inferred],
+    inferred: [...reading.inferred, ...zoneInference(recorded, timeZone)],
     remarks: remarksOnSettings({ rbwHz, grid }),
   };
+}
+
+function momentOfRecording({ wallTime, offset }: RecordedTime, timeZone: string): string | null {
+  return offset === null ? (momentOf(wallTime, timeZone) ?? null) : new Date(wallTime + offset).toISOString();
+}
+
+function zoneInference(recorded: RecordedTime | null, timeZone: string): ReadingView['inferred'] {
+  if (recorded === null || recorded.offset !== null) return [];
+  const value = recorded.wallTime.replace('T', ' ');
+  return [{ what: 'taken at', value, why: `line ${recorded.line} says so without a zone; read in ${timeZone}` }];
 }
 
 /** Every trace of a file in full. */

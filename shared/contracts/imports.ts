@@ -24,6 +24,13 @@ export const ReadingView = z.object({
   decimalMark: z.string(),
   rbwHz: z.number().nullable(),
   attenuationDb: z.number().nullable(),
+  preamble: z
+    .array(z.object({ line: z.int(), key: z.string(), value: z.string() }))
+    .describe('the lines above the table; the key is empty where a line is plain text'),
+  takenAt: z.iso
+    .datetime()
+    .nullable()
+    .describe("when the file says it was recorded, UTC; a time without a zone is read in the team's"),
   traces: z.array(
     z.object({
       trace: z.int(),
@@ -81,6 +88,7 @@ export const ImportBatchView = z.object({
       status: z.enum(['waiting', 'imported', 'duplicate', 'refused']),
       sweepId: z.int().nullable(),
       productKey: z.string().nullable(),
+      productName: z.string().nullable(),
       buildId: z.int().nullable(),
       worstMarginDb: z.number().nullable(),
       problem: Problem.nullable(),

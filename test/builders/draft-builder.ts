@@ -15,6 +15,8 @@ export function aReading(traces: readonly Partial<ReadTrace>[] = [{}], change: P
     decimalMark: '.',
     rbwHz: null,
     attenuationDb: null,
+    preamble: [],
+    takenAt: null,
     inferred: [],
     remarks: [],
     ...change,

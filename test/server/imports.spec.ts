@@ -90,6 +90,25 @@ describe('POST /api/teams/:team/readings', () => {
     expect(countStored(context)).toEqual(before);
   });
 
+  it('gives the lines above the table, and the time among them in the zone of the team', async () => {
+    const content = Buffer.concat([Buffer.from('Date,02.07.2026 09:20:15\n'), file()]);
+    const { body } = await read(content).expect(200);
+    expect(body.preamble).toEqual([
+      { line: 1, key: 'Date', value: '02.07.2026 09:20:15' },
+      { line: 2, key: 'RBW', value: '9 kHz' },
+    ]);
+    // Lisbon is one hour ahead of UTC in July (IANA time zone database).
+    expect(body.takenAt).toBe('2026-07-02T08:20:15.000Z');
+    expect(body.inferred).toContainEqual({
+      what: 'taken at',
+      value: '2026-07-02 09:20:15',
+      why: 'line 1 says so without a zone; read in Europe/Lisbon',
+    });
+    const zoned = Buffer.concat([Buffer.from('Date,2026-03-02T09:20:15+02:00\n'), file()]);
+    expect((await read(zoned).expect(200)).body).toMatchObject({ takenAt: '2026-03-02T07:20:15.000Z', inferred: [] });
+    expect((await read(file()).expect(200)).body.takenAt).toBeNull();
+  });
+
   it('gives every level in a frame when asked for one', async () => {
     const chunks: Buffer[] = [];
     await read(file())
@@ -142,7 +161,7 @@ describe('a batch of files', () => {
     expect(done.items.map(({ status }) => status)).toEqual(['imported', 'refused', 'imported', 'duplicate']);
     expect(done.items[1]?.problem).toMatchObject({ type: '/problems/unreadable', status: 422 });
     expect(done.items[3]?.sweepId).toBe(done.items[0]?.sweepId);
-    expect(done.items[0]).toMatchObject({ productKey: 'psu-240', fileName: 'sweep-1.csv' });
+    expect(done.items[0]).toMatchObject({ productKey: 'psu-240', productName: product.name, fileName: 'sweep-1.csv' });
     expect(done.items[0]?.worstMarginDb).toBeGreaterThan(0);
     const stored = context.db.select().from(sweeps).all();
     expect(stored.map(({ correction }) => correction)).toEqual(['inFile', 'none']);

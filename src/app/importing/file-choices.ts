@@ -1,10 +1,11 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, output } from '@angular/core';
 import type { BatchTags } from '@shared/contracts/imports';
 import { SWEEP_KINDS } from '@shared/detectors/detectors';
+import { momentOf, wallTimeOf } from '@shared/time/zoned-time';
 import { CurrentTeam } from '../session/current-team';
 import type { DraftFile, FileChoice } from './draft-file';
 import { KIND_WORDS } from './kind-words';
-import { momentOf, wallTimeOf } from './zoned-time';
+import { takenAtOf } from './taken-at-of';
 
 /** What is different about one file: state, time, run and role, over the common tags. */
 @Component({
@@ -37,8 +38,12 @@ import { momentOf, wallTimeOf } from './zoned-time';
         #takenAt
         type="datetime-local"
         [value]="wallTime()"
-        (change)="chosen.emit({ takenAt: moment(takenAt.value) })"
+        [attr.aria-describedby]="takenAtNote() ? fieldId('taken-at-note') : null"
+        (change)="chooseTakenAt(takenAt)"
       />
+      @if (takenAtNote(); as note) {
+        <span class="note" [id]="fieldId('taken-at-note')">{{ note }}</span>
+      }
     </div>
     <div>
       <label [attr.for]="fieldId('run')">Run</label>
@@ -74,9 +79,12 @@ export class FileChoices {
   protected readonly kinds = SWEEP_KINDS;
   protected readonly kindWords = KIND_WORDS;
   protected readonly listId = computed(() => this.fieldId('states'));
-  protected readonly wallTime = computed(() => {
-    const at = this.file().choice.takenAt ?? this.common().takenAt;
-    return at === undefined ? '' : wallTimeOf(at, this.team.timeZone());
+  private readonly time = computed(() => takenAtOf(this.file(), this.common()));
+  protected readonly wallTime = computed(() => this.wallTimeAt(this.time().takenAt));
+  protected readonly takenAtNote = computed(() => {
+    const stated = this.file().reading?.takenAt ?? null;
+    if (stated === null) return '';
+    return this.time().isFromFile ? 'from the file' : `the file says ${this.wallTimeAt(stated).replace('T', ' ')}`;
   });
 
   protected fieldId(name: string): string {
@@ -87,8 +95,18 @@ export class FileChoices {
     return text.trim() || undefined;
   }
 
-  protected moment(wallTime: string): string | undefined {
-    return momentOf(wallTime, this.team.timeZone());
+  /** Emptied, the field goes back to what holds without a choice. */
+  protected chooseTakenAt(field: HTMLInputElement): void {
+    const takenAt = momentOf(field.value, this.team.timeZone());
+    const { choice, ...file } = this.file();
+    if (takenAt === undefined) {
+      field.value = this.wallTimeAt(takenAtOf({ ...file, choice: { ...choice, takenAt } }, this.common()).takenAt);
+    }
+    this.chosen.emit({ takenAt });
+  }
+
+  private wallTimeAt(at: string | undefined): string {
+    return at === undefined ? '' : wallTimeOf(at, this.team.timeZone());
   }
 
   protected chooseKind(text: string): void {

@@ -168,6 +168,42 @@ describe('ImportPage', () => {
     expect(fixture.componentInstance.unsaved()).toContain('One file and its tags are not saved yet');
   });
 
+  it('takes the time in a file for that file and says so, until somebody types one', async () => {
+    const { element, settle, drop, typeBuild, save, http } = await open();
+    const [first, second] = await drop('a.csv', 'b.csv');
+    first.flush({ ...twoTraces, sha256: 'a', takenAt: '2026-03-02T08:20:15.000Z' });
+    second.flush({ ...twoTraces, sha256: 'b', takenAt: '2026-03-02T10:00:00.000Z' });
+    await settle();
+    const field = () => element.querySelector<HTMLInputElement>('app-file-choices input[type=datetime-local]');
+    const note = () => element.querySelector('app-file-choices .note')?.textContent;
+    expect([field()?.value, note()]).toEqual(['2026-03-02T08:20', 'from the file']);
+
+    const type = async (text: string) => {
+      const input = field();
+      if (input) input.value = text;
+      input?.dispatchEvent(new Event('change'));
+      await settle();
+    };
+    await type('2026-03-02T09:00');
+    expect([field()?.value, note()]).toEqual(['2026-03-02T09:00', 'the file says 2026-03-02 08:20']);
+    await type('');
+    expect([field()?.value, note()]).toEqual(['2026-03-02T08:20', 'from the file']);
+    await type('');
+    expect(field()?.value).toBe('2026-03-02T08:20');
+
+    await type('2026-03-02T09:00');
+    await typeBuild();
+    await save();
+    const request = http.expectOne({ method: 'POST', url: '/api/teams/power/imports' });
+    const { items } = JSON.parse((request.request.body as FormData).get('plan') as string) as ImportPlan;
+    expect(items.map(({ tags }) => tags.takenAt)).toEqual([
+      '2026-03-02T09:00:00.000Z',
+      '2026-03-02T09:00:00.000Z',
+      '2026-03-02T10:00:00.000Z',
+      '2026-03-02T10:00:00.000Z',
+    ]);
+  });
+
   it('has nothing to lose before files are there', async () => {
     const { fixture } = await open();
     expect(fixture.componentInstance.unsaved()).toBeNull();

@@ -1,5 +1,6 @@
 import type { BatchItemTags, BatchTags } from '@shared/contracts/imports';
 import { DraftFile, statedDetector, statedLine } from './draft-file';
+import { takenAtOf } from './taken-at-of';
 
 /**
  * The tags that one trace adds to the common ones. The nearest word wins: trace, file, what the file itself says, common.
@@ -17,6 +18,7 @@ export function traceTags(file: DraftFile, index: number, common: BatchTags): Ba
     detector: choice.detector ?? statedDetector(read) ?? common.detector,
     kind: choice.kind ?? kind ?? 'product',
     ...ofFile,
+    takenAt: takenAtOf(file, common).takenAt,
     ...file.units,
   });
 }

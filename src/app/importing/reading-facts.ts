@@ -20,6 +20,20 @@ const DELIMITER_WORDS: Record<string, string> = { ',': 'comma', ';': 'semicolon'
         </div>
       }
     </dl>
+    @if (reading().preamble.length > 0) {
+      <details>
+        <summary>{{ preambleWords() }}</summary>
+        <table>
+          @for (one of reading().preamble; track one.line) {
+            <tr>
+              <td class="number">{{ one.line }}</td>
+              <th scope="row">{{ one.key }}</th>
+              <td>{{ one.value }}</td>
+            </tr>
+          }
+        </table>
+      </details>
+    }
     @for (one of reading().inferred; track one.what) {
       <p>
         <mat-icon class="inline-icon" svgIcon="info" /><strong>{{ one.what }} {{ one.value }}</strong
@@ -50,6 +64,26 @@ const DELIMITER_WORDS: Record<string, string> = { ',': 'comma', ';': 'semicolon'
     dd {
       margin: 0;
     }
+    summary {
+      width: fit-content;
+      color: var(--sl-ink-muted);
+      cursor: pointer;
+    }
+    table {
+      margin-block-start: 4px;
+      font-size: 12px;
+    }
+    table td,
+    table th {
+      padding: 0 12px 2px 0;
+      font-weight: 400;
+      text-align: start;
+      vertical-align: top;
+      overflow-wrap: anywhere;
+    }
+    table td.number {
+      color: var(--sl-ink-muted);
+    }
     mat-icon {
       margin-inline-end: 4px;
       color: var(--sl-ink-muted);
@@ -68,6 +102,11 @@ export class ReadingFacts {
     return reading.rbwHz === null && rbwHz !== undefined
       ? remarksOnSettings({ rbwHz, grid: reading })
       : reading.remarks;
+  });
+
+  protected readonly preambleWords = computed(() => {
+    const { length } = this.reading().preamble;
+    return length === 1 ? 'One line above the table' : `${length} lines above the table`;
   });
 
   protected readonly facts = computed(() => {

@@ -1,6 +1,6 @@
 import type { BatchTags } from '@shared/contracts/imports';
+import { momentOf } from '@shared/time/zoned-time';
 import { withoutGaps } from './merge-tags';
-import { momentOf } from './zoned-time';
 import type { TagsForm, TagsFormContent } from './tags-form';
 
 /** The common tags as the server takes them; what is empty is left out. */
