@@ -31,6 +31,7 @@ type Standing = 'clear' | 'tight' | 'over' | 'unmeasured';
       height: 14px;
       margin-inline-end: 2px;
       vertical-align: -2px;
+      line-height: 0;
     }
     :host(.over) {
       color: var(--sl-margin-text-over);

@@ -13,7 +13,6 @@ const ADVICE: Partial<Record<ProblemCode, string>> = {
   signedOut: 'Sign in again; you come back to this page.',
   forbidden: 'Ask a lead of the team if you need to do this.',
   notFound: 'It may have been removed, or belongs to a team you are not in. Go back to the list.',
-  conflict: 'Somebody or something changed it in the meantime. Reload to see how it stands now.',
   throttled: 'Wait a minute, then try again.',
   internal: 'Try again. If it happens again, tell whoever runs this installation.',
 };
