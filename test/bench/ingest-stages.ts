@@ -10,7 +10,7 @@ import { bytesOf } from '../../server/sweeps/measure-sweep';
 import { OriginalFiles, sha256 } from '../../server/sweeps/original-files';
 import { packTrace } from '../../server/sweeps/pack-trace';
 import { knownGrid, plannedLine } from '../../server/sweeps/prepared-grids';
-import { openBenchContext } from './bench-context';
+import { type BenchContext, openBenchContext } from './bench-context';
 import { type Measured, measureRounds } from './measure-rounds';
 import { syntheticTags } from './synthetic-sweep';
 
@@ -39,6 +39,9 @@ export interface IngestStages {
 /** Measures the parts of an import, the whole and its floors in the same rounds. */
 export function measureStages(files: readonly Buffer[]): IngestStages {
   const context = openBenchContext();
+  // One of its own: a file that the other had kept already would cost it nothing.
+  const together = openBenchContext();
+  const originals = new OriginalFiles(join(context.folder, 'kept'));
   const rounds = Math.floor(files.length / BLOCK) - 1;
   const reading = readDelimited(files[0] ?? Buffer.alloc(0));
   const { frequenciesHz } = reading;
@@ -56,14 +59,12 @@ export function measureStages(files: readonly Buffer[]): IngestStages {
     };
   };
   const each = (work: (file: Buffer) => void) => blocks((block) => block.forEach(work));
-  let folder = 0;
-  const importBlock = (offset: number) => (block: readonly Buffer[], first: number) =>
+  const importInto = (into: BenchContext) => (block: readonly Buffer[], first: number) =>
     block.forEach((bytes, index) => {
-      const tags = SweepTags.parse(syntheticTags(offset + first + index));
-      importSweep(context, context.actor, { bytes, fileName: 'sweep.csv', tags });
+      const tags = SweepTags.parse(syntheticTags(first + index));
+      importSweep(into, into.actor, { bytes, fileName: 'sweep.csv', tags });
     });
-  const importAlone = importBlock(0);
-  const importInOne = importBlock(files.length);
+  const importInOne = importInto(together);
 
   const candidates = {
     hash: each((file) => void sha256(file)),
@@ -74,13 +75,10 @@ export function measureStages(files: readonly Buffer[]): IngestStages {
       sweepMargins(levels, knownGrid(gridHash, frequenciesHz, planned, []));
     }),
     pack: each(() => void packTrace(levels)),
-    keep: blocks((block) => {
-      const originals = new OriginalFiles(join(context.folder, `kept-${(folder += 1)}`));
-      for (const file of block) originals.keep(file, sha256(file));
-    }),
-    importOneEach: blocks(importAlone),
+    keep: each((file) => void originals.keep(file)),
+    importOneEach: blocks(importInto(context)),
     importTogether: blocks((block, first) =>
-      inGroups(block, (group, offset) => withTransaction(context.db, () => importInOne(group, first + offset))),
+      inGroups(block, (group, offset) => withTransaction(together.db, () => importInOne(group, first + offset))),
     ),
     insertOneEach: each(() => void raw.insert.run(blob)),
     insertTogether: blocks((block) =>
@@ -92,6 +90,7 @@ export function measureStages(files: readonly Buffer[]): IngestStages {
     rounds,
   );
   raw.close();
+  together.close();
   context.close();
   return Object.fromEntries(measured.map((one) => [one.name, one])) as unknown as IngestStages;
 }
