@@ -53,11 +53,12 @@ function rowsOf(context: Context, { product }: FoundProduct, ids: readonly numbe
   const rows = new Map(
     listSweepRows(context.db, { productId: product.id, ids }, ids.length).map((row) => [row.sweep.id, row]),
   );
-  return ids.map((id) => {
-    const row = rows.get(id);
-    if (row === undefined) throw new ServiceError('notFound', `sweeps: ${id} is no sweep of "${product.key}"`);
-    return row;
-  });
+  // Evidence names sweeps that may have been removed since; the others are still worth seeing.
+  const present = ids.flatMap((id) => rows.get(id) ?? []);
+  if (ids.length > 0 && present.length === 0) {
+    throw new ServiceError('notFound', `sweeps: ${ids.join(', ')} is no sweep of "${product.key}"`);
+  }
+  return present;
 }
 
 /** The background nearest in time to each sweep, on the same bench and day; through a share only the product's own. */

@@ -192,8 +192,12 @@ function longMantissa(bytes: Uint8Array, start: number, end: number): number {
   return mantissa;
 }
 
-/** The same for any number of digits and any power, by way of Number(). */
+/** Longer than any instrument writes; beyond it only somebody's attempt to keep the reader busy. */
+const MOST_DIGITS = 64;
+
+/** The same for any number of digits and any power, by way of Number(); Infinity, which no file may hold, beyond 64. */
 function slowNumber(bytes: Uint8Array, start: number, end: number, power: number): number {
+  if (end - start > MOST_DIGITS) return Infinity;
   let digits = '';
   for (let i = start; i < end; i++) if ((bytes[i] ^ DIGIT_ZERO) < 10) digits += String.fromCharCode(bytes[i]);
   return Number(`${digits}e${power}`);

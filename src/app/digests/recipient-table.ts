@@ -12,7 +12,7 @@ type Recipient = DigestView['recipients'][number];
   imports: [MatIcon, MatIconButton, TimeStamp],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <div class="table-frame">
+    <div class="table-frame" tabindex="0" role="group" aria-label="Who gets the digest">
       <table class="dense-table">
         <caption class="visually-hidden">
           Recipients of the digest

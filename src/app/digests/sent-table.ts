@@ -12,7 +12,7 @@ import { periodWords } from './digest-words';
     @if (sent().length === 0) {
       <p class="muted">None yet.</p>
     } @else {
-      <div class="table-frame">
+      <div class="table-frame" tabindex="0" role="group" aria-label="Digests sent">
         <table class="dense-table">
           <caption class="visually-hidden">
             Digests sent so far

@@ -26,7 +26,7 @@ import { parseFrequency } from './parse-frequency';
       />
       <mat-error>Write a frequency such as 156 kHz, 0.5 MHz or 7.21M.</mat-error>
     </mat-form-field>
-    <div class="table-frame">
+    <div class="table-frame" tabindex="0" role="group" aria-label="Limits at the frequency">
       <table class="dense-table">
         <caption class="visually-hidden">
           Limits at

@@ -26,7 +26,7 @@ import { FrequencyPipe } from '../ui/frequency';
       </dd>
     </dl>
     <p class="note"><mat-icon class="inline-icon" svgIcon="info" />{{ set.note }}</p>
-    <div class="table-frame">
+    <div class="table-frame" tabindex="0" role="group" aria-label="Segments of the limit">
       <table class="dense-table">
         <caption class="visually-hidden">
           Segments of

@@ -14,7 +14,7 @@ import { ROLE_WORDS } from './role-words';
   imports: [MatButton, MatIcon, MatIconButton, MatMenuModule, MatTooltip, TimeStamp],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <div class="table-frame">
+    <div class="table-frame" tabindex="0" role="group" aria-label="Members">
       <table class="dense-table">
         <caption class="visually-hidden">
           Members

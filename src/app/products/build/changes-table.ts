@@ -15,7 +15,7 @@ export interface ComparedBuild {
   imports: [RouterLink],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <div class="table-frame">
+    <div class="table-frame" tabindex="0" role="group" aria-label="Declared changes">
       <table class="dense-table">
         <thead>
           <tr>

@@ -14,7 +14,7 @@ import { switchingChanges } from './switching-changes';
   template: `
     <h2>Switching frequencies</h2>
     @if (changes().length > 0) {
-      <div class="table-frame">
+      <div class="table-frame" tabindex="0" role="group" aria-label="Switching frequencies">
         <table class="dense-table">
           <thead>
             <tr>

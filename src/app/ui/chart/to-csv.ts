@@ -5,7 +5,15 @@ export function toCsv(rows: Iterable<readonly (string | number | null)[]>): stri
   return text;
 }
 
+/** A text that a spreadsheet would take for a formula; the names of the lines "+" and "-" alone are none. */
+const FORMULA = /^[=+\-@\t].+/s;
+
 function cell(content: string | number | null): string {
-  const text = content === null ? '' : String(content);
+  const text = content === null ? '' : typeof content === 'string' ? asText(content) : String(content);
   return /[",\r\n]/.test(text) ? `"${text.replaceAll('"', '""')}"` : text;
+}
+
+/** Keeps a spreadsheet from running what somebody wrote into a name or note; numbers in text stay numbers. */
+function asText(text: string): string {
+  return FORMULA.test(text) && Number.isNaN(Number(text)) ? `'${text}` : text;
 }
