@@ -171,8 +171,8 @@ export function scanColumns(bytes: Uint8Array, layout: ColumnLayout, use: Column
     row++;
   }
   return {
-    frequenciesHz: frequenciesHz.slice(0, row),
-    columns: columns.map((column) => column.slice(0, row)),
+    frequenciesHz: cutOff(frequenciesHz, row),
+    columns: columns.map((column) => cutOff(column, row)),
     brokenRow: brokenOffset < 0 ? null : { offset: brokenOffset, row },
   };
 }
@@ -180,6 +180,11 @@ export function scanColumns(bytes: Uint8Array, layout: ColumnLayout, use: Column
 function grown<T extends Float64Array | Float32Array>(from: T, into: T): T {
   into.set(from);
   return into;
+}
+
+/** The first numbers of a column; copied only where what lies behind them would keep much memory for nothing. */
+function cutOff<T extends Float64Array | Float32Array>(column: T, rows: number): T {
+  return (2 * rows > column.length ? column.subarray(0, rows) : column.slice(0, rows)) as T;
 }
 
 /** Digits as one number, whatever mark stands between them; exact up to 15 digits. */
