@@ -12,7 +12,7 @@ import {
   shiftPositions,
   updateLatestBuild,
 } from './build-store';
-import { findOrInsertFirmware, findOrInsertHardware } from './revision-store';
+import { findOrInsertRevision } from './revision-store';
 
 export interface WantedBuild {
   hardware: string;
@@ -36,8 +36,8 @@ export function findOrCreateBuild(context: Context, actor: Actor, product: Produ
     shiftPositions(db, product.id, position);
     const build = insertBuild(db, {
       productId: product.id,
-      hardwareId: findOrInsertHardware(db, product.id, wanted.hardware, now).id,
-      firmwareId: findOrInsertFirmware(db, product.id, wanted.firmware, now).id,
+      hardwareId: findOrInsertRevision(db, 'hardware', product.id, wanted.hardware, now),
+      firmwareId: findOrInsertRevision(db, 'firmware', product.id, wanted.firmware, now),
       position,
       builtAt: wanted.builtAt,
       switching: wanted.switching ?? [],

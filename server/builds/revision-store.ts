@@ -5,48 +5,28 @@ import { firmwareRevisions, hardwareRevisions } from '../db/schema';
 export type HardwareRevision = typeof hardwareRevisions.$inferSelect;
 export type FirmwareRevision = typeof firmwareRevisions.$inferSelect;
 
-/** The revision with this name, made as the newest if there is none. */
-export function findOrInsertHardware(
-  db: Database,
-  productId: number,
-  name: string,
-  createdAt: number,
-): HardwareRevision {
-  const found = db
-    .select()
-    .from(hardwareRevisions)
-    .where(and(eq(hardwareRevisions.productId, productId), eq(hardwareRevisions.name, name)))
-    .get();
-  if (found) return found;
-  const last = db
-    .select({ position: max(hardwareRevisions.position) })
-    .from(hardwareRevisions)
-    .where(eq(hardwareRevisions.productId, productId))
-    .get();
-  const position = (last?.position ?? 0) + 1;
-  return db.insert(hardwareRevisions).values({ productId, name, position, createdAt }).returning().get();
-}
+const TABLES = { hardware: hardwareRevisions, firmware: firmwareRevisions };
 
-/** The revision with this name, made as the newest if there is none. */
-export function findOrInsertFirmware(
+/** Row id of the revision with this name, made as the newest if there is none. */
+export function findOrInsertRevision(
   db: Database,
+  kind: keyof typeof TABLES,
   productId: number,
   name: string,
   createdAt: number,
-): FirmwareRevision {
-  const found = db
-    .select()
-    .from(firmwareRevisions)
-    .where(and(eq(firmwareRevisions.productId, productId), eq(firmwareRevisions.name, name)))
-    .get();
-  if (found) return found;
+): number {
+  const table = TABLES[kind];
+  const isNamed = and(eq(table.productId, productId), eq(table.name, name));
+  const found = db.select({ id: table.id }).from(table).where(isNamed).get();
+  if (found) return found.id;
   const last = db
-    .select({ position: max(firmwareRevisions.position) })
-    .from(firmwareRevisions)
-    .where(eq(firmwareRevisions.productId, productId))
+    .select({ position: max(table.position) })
+    .from(table)
+    .where(eq(table.productId, productId))
     .get();
   const position = (last?.position ?? 0) + 1;
-  return db.insert(firmwareRevisions).values({ productId, name, position, createdAt }).returning().get();
+  const stored = db.insert(table).values({ productId, name, position, createdAt }).returning({ id: table.id }).get();
+  return stored.id;
 }
 
 export function findHardware(db: Database, id: number): HardwareRevision | undefined {

@@ -1,3 +1,5 @@
+import { momentOf, wallTimeOf } from '@shared/time/zoned-time';
+
 const DAY_MS = 24 * 3600_000;
 const WEEK_DAYS = 7;
 
@@ -10,32 +12,20 @@ export interface WeeklyTime {
   timeZone: string;
 }
 
-/** A moment as the clock on the wall of a zone shows it. */
-export interface WallTime {
+/** A day as the calendar on the wall of a zone shows it. */
+interface LocalDay {
   year: number;
   month: number;
   day: number;
-  hour: number;
-  minute: number;
   /** 1 Monday ... 7 Sunday. */
   weekday: number;
 }
 
 /** @param at UTC milliseconds */
-export function wallTime(at: number, timeZone: string): WallTime {
-  const format = new Intl.DateTimeFormat('en-CA', {
-    timeZone,
-    hourCycle: 'h23',
-    year: 'numeric',
-    month: '2-digit',
-    day: '2-digit',
-    hour: '2-digit',
-    minute: '2-digit',
-  });
-  const parts = Object.fromEntries(format.formatToParts(at).map(({ type, value }) => [type, Number(value)]));
-  const { year, month, day, hour, minute } = parts;
+function localDay(at: number, timeZone: string): LocalDay {
+  const [year = 0, month = 0, day = 0] = wallTimeOf(at, timeZone).split(/\D/).map(Number);
   const sundayFirst = new Date(Date.UTC(year, month - 1, day)).getUTCDay();
-  return { year, month, day, hour, minute, weekday: sundayFirst === 0 ? WEEK_DAYS : sundayFirst };
+  return { year, month, day, weekday: sundayFirst === 0 ? WEEK_DAYS : sundayFirst };
 }
 
 /**
@@ -45,7 +35,7 @@ export function wallTime(at: number, timeZone: string): WallTime {
  * @returns UTC milliseconds
  */
 export function lastDue(at: number, { weekday, hour, timeZone }: WeeklyTime): number {
-  const now = wallTime(at, timeZone);
+  const now = localDay(at, timeZone);
   const daysSince = (now.weekday - weekday + WEEK_DAYS) % WEEK_DAYS;
   const due = atWallTime(now.year, now.month, now.day - daysSince, hour, timeZone);
   return due <= at ? due : atWallTime(now.year, now.month, now.day - daysSince - WEEK_DAYS, hour, timeZone);
@@ -53,13 +43,13 @@ export function lastDue(at: number, { weekday, hour, timeZone }: WeeklyTime): nu
 
 /** When the digest falls due next, after `at`, UTC milliseconds. */
 export function nextDue(at: number, weekly: WeeklyTime): number {
-  const last = wallTime(lastDue(at, weekly), weekly.timeZone);
+  const last = localDay(lastDue(at, weekly), weekly.timeZone);
   return atWallTime(last.year, last.month, last.day + WEEK_DAYS, weekly.hour, weekly.timeZone);
 }
 
 /** ISO 8601 week of a moment in a zone, such as `2026-W49`. */
 export function isoWeek(at: number, timeZone: string): string {
-  const { year, month, day, weekday } = wallTime(at, timeZone);
+  const { year, month, day, weekday } = localDay(at, timeZone);
   // The Thursday of a week decides which year it belongs to (ISO 8601).
   const thursday = new Date(Date.UTC(year, month - 1, day - weekday + 4));
   const firstOfYear = Date.UTC(thursday.getUTCFullYear(), 0, 1);
@@ -69,14 +59,6 @@ export function isoWeek(at: number, timeZone: string): string {
 
 /** The moment at which the wall clock of the zone shows this date and full hour; `day` may lie outside the month. */
 function atWallTime(year: number, month: number, day: number, hour: number, timeZone: string): number {
-  const asUtc = Date.UTC(year, month - 1, day, hour);
-  const guess = asUtc - offset(asUtc, timeZone);
-  return asUtc - offset(guess, timeZone);
-}
-
-/** How far the zone's wall clock is ahead of UTC, milliseconds. */
-function offset(at: number, timeZone: string): number {
-  const { year, month, day, hour, minute } = wallTime(at, timeZone);
-  const minutes = Math.floor(at / 60_000) * 60_000;
-  return Date.UTC(year, month - 1, day, hour, minute) - minutes;
+  const shown = new Date(Date.UTC(year, month - 1, day, hour)).toISOString().slice(0, -1);
+  return Date.parse(momentOf(shown, timeZone) ?? '');
 }

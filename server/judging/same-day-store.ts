@@ -22,6 +22,14 @@ const DAY_SWEEP = {
   position: builds.position,
 };
 
+function selectDaySweeps(db: Database) {
+  return db
+    .select(DAY_SWEEP)
+    .from(sweeps)
+    .innerJoin(products, eq(products.id, sweeps.productId))
+    .innerJoin(builds, eq(builds.id, sweeps.buildId));
+}
+
 /** Product sweeps of other products taken on one of the benches between two times. */
 export function listOtherProductSweeps(
   db: Database,
@@ -30,11 +38,7 @@ export function listOtherProductSweeps(
   from: number,
   to: number,
 ): DaySweep[] {
-  return db
-    .select(DAY_SWEEP)
-    .from(sweeps)
-    .innerJoin(products, eq(products.id, sweeps.productId))
-    .innerJoin(builds, eq(builds.id, sweeps.buildId))
+  return selectDaySweeps(db)
     .where(
       and(
         inArray(sweeps.benchId, [...benchIds]),
@@ -54,11 +58,7 @@ export function listSweepsBefore(
   [fromPosition, endPosition]: readonly [number, number],
   before: number,
 ): DaySweep[] {
-  return db
-    .select(DAY_SWEEP)
-    .from(sweeps)
-    .innerJoin(products, eq(products.id, sweeps.productId))
-    .innerJoin(builds, eq(builds.id, sweeps.buildId))
+  return selectDaySweeps(db)
     .where(
       and(
         eq(sweeps.productId, productId),

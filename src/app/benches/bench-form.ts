@@ -7,8 +7,8 @@ import type { BenchInput, BenchView } from '@shared/contracts/benches';
 import type { Problem } from '@shared/contracts/problem';
 import { applyProblem } from '../ui/apply-problem';
 import { FieldErrorPipe } from '../ui/field-error';
+import { keyOfName } from '../ui/key-of-name';
 import { ProblemBanner } from '../ui/problem-banner';
-import { keyOfName } from './key-of-name';
 
 /** A new bench, or what is said of one that exists. */
 @Component({

@@ -5,8 +5,8 @@ import { RouterLink } from '@angular/router';
 import type { ImportBatchView } from '@shared/contracts/imports';
 import { CurrentTeam } from '../session/current-team';
 import type { IconName } from '../ui/icons';
+import { KIND_WORDS } from '../ui/kind-words';
 import { MarginValue } from '../ui/margin-value';
-import { KIND_WORDS } from './kind-words';
 
 type Item = ImportBatchView['items'][number];
 

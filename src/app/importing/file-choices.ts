@@ -3,8 +3,8 @@ import type { BatchTags } from '@shared/contracts/imports';
 import { SWEEP_KINDS } from '@shared/detectors/detectors';
 import { momentOf, wallTimeOf } from '@shared/time/zoned-time';
 import { CurrentTeam } from '../session/current-team';
+import { KIND_WORDS } from '../ui/kind-words';
 import type { DraftFile, FileChoice } from './draft-file';
-import { KIND_WORDS } from './kind-words';
 import { takenAtOf } from './taken-at-of';
 
 /** What is different about one file: state, time, run and role, over the common tags. */

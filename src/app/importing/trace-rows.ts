@@ -2,8 +2,8 @@ import { ChangeDetectionStrategy, Component, computed, input, output } from '@an
 import { MatIcon } from '@angular/material/icon';
 import type { BatchTags } from '@shared/contracts/imports';
 import { DETECTORS, type Line, LINES, SWEEP_KINDS, type SweepKind } from '@shared/detectors/detectors';
+import { KIND_WORDS } from '../ui/kind-words';
 import { DraftFile, ReadTrace, statedDetector, statedLine, TraceChoice } from './draft-file';
-import { KIND_WORDS } from './kind-words';
 
 interface Row {
   read: ReadTrace;

@@ -13,9 +13,9 @@ import { formatDecibels } from '@shared/units/format-decibels';
 import { CurrentTeam } from '../session/current-team';
 import { applyProblem } from '../ui/apply-problem';
 import { FieldErrorPipe } from '../ui/field-error';
+import { keyOfName } from '../ui/key-of-name';
 import { problemOf } from '../ui/problem';
 import { ProblemBanner } from '../ui/problem-banner';
-import { keyFromName } from './key-from-name';
 
 /** Asks for what a product cannot be without; closes with the key of the new one. */
 @Component({
@@ -59,7 +59,7 @@ export class NewProductDialog {
   /** The key follows the name until somebody writes one. */
   protected followName(): void {
     const { name, key } = this.form.controls;
-    if (key.pristine) key.setValue(keyFromName(name.value));
+    if (key.pristine) key.setValue(keyOfName(name.value));
   }
 
   protected create(): void {

@@ -1,7 +1,7 @@
 import type { SweepView } from '@shared/contracts/sweeps';
 import { findLimitSet } from '@shared/limits/limit-sets';
 import { formatFrequency } from '@shared/units/format-frequency';
-import { KIND_WORDS } from './kind-words';
+import { KIND_WORDS } from '../ui/kind-words';
 
 export interface Fact {
   readonly name: string;

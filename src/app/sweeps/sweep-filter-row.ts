@@ -7,7 +7,7 @@ import type { BenchView } from '@shared/contracts/benches';
 import type { BuildSummary } from '@shared/contracts/builds';
 import type { ProductSummary, ProductView } from '@shared/contracts/products';
 import { DETECTORS, LINES, SWEEP_KINDS } from '@shared/detectors/detectors';
-import { KIND_WORDS } from './kind-words';
+import { KIND_WORDS } from '../ui/kind-words';
 import type { SweepFilter, SweepFilterName } from './sweep-filter';
 
 interface Choice {

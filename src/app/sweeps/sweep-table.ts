@@ -6,9 +6,9 @@ import { RouterLink } from '@angular/router';
 import type { SweepView } from '@shared/contracts/sweeps';
 import { CurrentTeam } from '../session/current-team';
 import { FrequencyPipe } from '../ui/frequency';
+import { KIND_WORDS } from '../ui/kind-words';
 import { MarginValue } from '../ui/margin-value';
 import { TimeStamp } from '../ui/time-stamp';
-import { KIND_WORDS } from './kind-words';
 
 /** Sweeps, newest import first; ticked ones can be laid over each other. */
 @Component({

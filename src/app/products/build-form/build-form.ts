@@ -1,7 +1,7 @@
 import { inject } from '@angular/core';
 import { NonNullableFormBuilder, Validators } from '@angular/forms';
 import type { BuildInput, BuildView } from '@shared/contracts/builds';
-import { isoOfWallTime, wallTimeOf } from './wall-time';
+import { momentOf, wallTimeOf } from '@shared/time/zoned-time';
 
 const name = [Validators.required, Validators.maxLength(120)];
 const notes = Validators.maxLength(4000);
@@ -39,12 +39,12 @@ export function buildForm(build: BuildView | undefined, now: number, timeZone: s
   };
 }
 
-/** What the server takes. */
+/** What the server takes; the form must be valid. */
 export function buildInput(form: ReturnType<typeof buildForm>['form'], timeZone: string): BuildInput {
   const { builtAt, switching, ...rest } = form.getRawValue();
   return {
     ...rest,
-    builtAt: isoOfWallTime(builtAt, timeZone),
+    builtAt: momentOf(builtAt, timeZone) ?? '',
     switching: switching.map(({ frequencyHz, ...stage }) => ({ ...stage, frequencyHz: hertz(frequencyHz ?? 0) })),
   };
 }
