@@ -1,14 +1,15 @@
 import { RECEIVER_BAND_B } from '@shared/detectors/receiver-bands';
-import { cellEdgesHz } from '@shared/limits/cells';
 import { firstIndexAbove, firstIndexAtOrAbove } from '@shared/traces/frequency-grid';
-import { type BandMargin, prepareGrid, sweepMargins } from '@shared/traces/margins';
+import { type BandMargin, sweepMargins } from '@shared/traces/margins';
 import type { Context } from '../context';
+import { bytesOf } from '../sweeps/measure-sweep';
+import { sha256 } from '../sweeps/original-files';
+import { knownGrid, plannedLine } from '../sweeps/prepared-grids';
 import { readTrace } from '../sweeps/read-trace';
 import { type BackgroundSweep, listBackgrounds } from './background-store';
 import type { BuildRecord } from './build-record';
 import type { ReadTraceFacts } from './gather-series';
 import type { JudgedSweep } from './judged-sweep-store';
-import { seriesPlan } from './series-plan';
 
 /** Sweeps no further apart belong to one day at the bench. */
 const SAME_DAY_MS = 12 * 3600_000;
@@ -84,7 +85,10 @@ function levelAround({ frequenciesHz, levelsDbuv }: Trace, frequencyHz: number):
   return highest;
 }
 
-function marginsToAverageLine({ product, team }: BuildRecord, trace: Trace): readonly BandMargin[] {
-  const { line, bands } = seriesPlan(product.limitSetKey, 'AV', team.bands);
-  return sweepMargins(trace.levelsDbuv, prepareGrid(trace.frequenciesHz, line, bands, cellEdgesHz())).bands;
+function marginsToAverageLine(
+  { product, team }: BuildRecord,
+  { frequenciesHz, levelsDbuv }: Trace,
+): readonly BandMargin[] {
+  const planned = plannedLine(product.limitSetKey, 'AV');
+  return sweepMargins(levelsDbuv, knownGrid(sha256(bytesOf(frequenciesHz)), frequenciesHz, planned, team.bands)).bands;
 }
