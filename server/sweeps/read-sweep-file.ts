@@ -55,12 +55,13 @@ function isReadable(bytes: Uint8Array): boolean {
 }
 
 function problemOfFile(code: ProblemCode, error: ReadingError): ServiceError {
-  const { line, column, found, expected, advice, message } = error;
+  const { line, column, found, expected, advice, needs, message } = error;
   return new ServiceError(code, message, {
     ...(line !== null && { line }),
     ...(column !== null && { column }),
     found,
     expected,
     ...(advice !== '' && { advice }),
+    ...(needs && { needs }),
   });
 }

@@ -1,3 +1,4 @@
+import { READING_NEEDS } from '@shared/traces/reading-error';
 import * as z from 'zod';
 
 /** Closed list of what can go wrong; the `type` of a problem is `/problems/<code>`. */
@@ -28,6 +29,7 @@ export const Problem = z
     found: z.string().optional(),
     expected: z.string().optional(),
     advice: z.string().optional().describe('what to do'),
+    needs: z.enum(READING_NEEDS).optional().describe('what the file leaves out and must be given with it'),
     errors: z.array(z.object({ path: z.string(), message: z.string() })).optional(),
   })
   .meta({ id: 'Problem' });

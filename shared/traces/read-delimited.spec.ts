@@ -144,11 +144,12 @@ describe('readDelimited', () => {
     it('asks for a frequency unit that the span leaves open', () => {
       const fault = faultOf(table({ unitHz: 1e6 }), { levelUnit: 'dBuV' });
       expect(fault).toMatchObject({ line: 1, column: 1, found: 'frequencies from 0.15 to 0.2355 without a unit' });
+      expect(fault.needs).toBe('frequencyUnit');
     });
 
     it('asks for a level unit that nobody states: it is never inferred', () => {
       const fault = faultOf(`Frequency [Hz],Level\n${table()}`);
-      expect(fault).toMatchObject({ line: 1, column: 2, found: 'no unit of level' });
+      expect(fault).toMatchObject({ line: 1, column: 2, found: 'no unit of level', needs: 'levelUnit' });
       expect(fault.message).toBe(
         'Line 1, column 2: found no unit of level, expected dBuV, dBm or dBmV, in the file or given with it. ' +
           'Choose the level unit for this file, or name it in the heading.',

@@ -129,6 +129,7 @@ function inferredUnit(
       found: `frequencies from ${first} to ${last} without a unit`,
       expected: 'Hz, kHz, MHz or GHz, in the file or given with it',
       advice: 'Choose the frequency unit for this file, or name it in the heading.',
+      needs: 'frequencyUnit',
     });
   }
   inferred.push({

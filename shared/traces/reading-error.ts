@@ -1,3 +1,7 @@
+/** What the sender can give with a file that leaves it out. */
+export const READING_NEEDS = ['frequencyUnit', 'levelUnit'] as const;
+export type ReadingNeed = (typeof READING_NEEDS)[number];
+
 export interface ReadingFault {
   /** Line of the file, from 1; null when the fault is not in one line. */
   readonly line: number | null;
@@ -7,6 +11,8 @@ export interface ReadingFault {
   readonly expected: string;
   /** What to do about it, one sentence; empty when the fault says it all. */
   readonly advice: string;
+  /** Set when nothing is wrong with the file but that this must be given with it. */
+  readonly needs?: ReadingNeed;
 }
 
 const LONGEST_QUOTE = 60;
@@ -18,6 +24,7 @@ export class ReadingError extends Error implements ReadingFault {
   readonly found: string;
   readonly expected: string;
   readonly advice: string;
+  readonly needs?: ReadingNeed;
 
   constructor(fault: ReadingFault) {
     super(describe(fault));
@@ -27,6 +34,7 @@ export class ReadingError extends Error implements ReadingFault {
     this.found = fault.found;
     this.expected = fault.expected;
     this.advice = fault.advice;
+    this.needs = fault.needs;
   }
 }
 

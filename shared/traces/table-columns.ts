@@ -152,6 +152,7 @@ function levelUnitOf(
     found: 'no unit of level',
     expected: 'dBuV, dBm or dBmV, in the file or given with it',
     advice: 'Choose the level unit for this file, or name it in the heading.',
+    needs: 'levelUnit',
   });
 }
 

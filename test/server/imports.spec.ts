@@ -128,7 +128,11 @@ describe('POST /api/teams/:team/readings', () => {
   it('takes a unit the file leaves out and names the place of a fault', async () => {
     const bare = Buffer.from(buildSweepFile({}, '').toString().trim());
     const missing = await read(bare).expect(422);
-    expect(missing.body).toMatchObject({ type: '/problems/unreadable', expected: expect.stringContaining('dBuV') });
+    expect(missing.body).toMatchObject({
+      type: '/problems/unreadable',
+      expected: expect.stringContaining('dBuV'),
+      needs: 'levelUnit',
+    });
     await read(bare).field('options', '{"levelUnit":"dBuV"}').expect(200);
   });
 

@@ -9,7 +9,6 @@ import { traceTags } from './merge-tags';
 import type { PlannedTrace } from './plan-import';
 import { ReadingFacts } from './reading-facts';
 import { alikeTraces } from './alike-traces';
-import { asksForUnits } from './reading-fault';
 import { ReadingProblem } from './reading-problem';
 import { missingWords } from './tag-gaps';
 import type { TagName } from './tag-words';
@@ -69,7 +68,7 @@ export class FileCard {
   protected readonly asksForUnits = computed(() => {
     const { problem, units, reading } = this.file();
     if (units.frequencyUnit !== undefined || units.levelUnit !== undefined) return true;
-    if (problem) return asksForUnits(problem);
+    if (problem) return problem.needs !== undefined;
     return reading?.inferred.some(({ what }) => what === 'frequency unit') ?? false;
   });
 

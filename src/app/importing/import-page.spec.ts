@@ -213,7 +213,10 @@ describe('ImportPage', () => {
     const { element, settle, drop, http } = await open();
     const [first] = await drop('a.csv');
     const detail = 'Column 2: found no unit of level, expected dBuV, dBm or dBmV, in the file or given with it.';
-    first.flush({ ...aProblem, line: undefined, detail }, { status: 422, statusText: 'Unprocessable' });
+    first.flush(
+      { ...aProblem, line: undefined, detail, needs: 'levelUnit' },
+      { status: 422, statusText: 'Unprocessable' },
+    );
     await settle();
     expect(element.querySelector('app-file-card')?.textContent).toContain('needs its units');
     const [, level] = element.querySelectorAll<HTMLSelectElement>('app-units-asked select');

@@ -1,5 +1,5 @@
 import type { Problem } from '@shared/contracts/problem';
-import { asksForUnits, excerptAround, readingFault } from './reading-fault';
+import { excerptAround, readingFault } from './reading-fault';
 
 const unreadable: Problem = {
   type: '/problems/unreadable',
@@ -47,14 +47,6 @@ describe('readingFault', () => {
 
   it('starts a place that is a column alone with a capital', () => {
     expect(readingFault({ ...unreadable, line: undefined }).place).toBe('Column 2');
-  });
-});
-
-describe('asksForUnits', () => {
-  it('sees when choosing a unit is the way out', () => {
-    const detail = 'Column 2: found no unit of level, expected dBuV, dBm or dBmV, in the file or given with it.';
-    expect(asksForUnits({ ...unreadable, detail })).toBe(true);
-    expect(asksForUnits(unreadable)).toBe(false);
   });
 });
 

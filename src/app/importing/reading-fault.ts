@@ -40,11 +40,6 @@ function capital(text: string): string {
   return text.charAt(0).toUpperCase() + text.slice(1);
 }
 
-/** Whether the way out is to say which unit a file is written in: only its texts tell, the code is the same for every fault. */
-export function asksForUnits({ detail, advice = '' }: Problem): boolean {
-  return /\bunit\b/i.test(`${detail} ${advice}`);
-}
-
 export interface ExcerptLine {
   readonly number: number;
   readonly text: string;

@@ -1,4 +1,5 @@
 import { ChangeDetectionStrategy, Component, input, output } from '@angular/core';
+import type { Problem } from '@shared/contracts/problem';
 import { FREQUENCY_UNITS, FrequencyUnit } from '@shared/units/frequency-unit';
 import { LEVEL_UNITS, LevelUnit } from '@shared/units/level-unit';
 import type { Units } from './draft-file';
@@ -10,7 +11,12 @@ import type { Units } from './draft-file';
   template: `
     <div class="field">
       <label for="frequency-unit-of-{{ fileId() }}">Frequencies in</label>
-      <select id="frequency-unit-of-{{ fileId() }}" (change)="chooseFrequency(frequency.value)" #frequency>
+      <select
+        id="frequency-unit-of-{{ fileId() }}"
+        [class.needed]="needs() === 'frequencyUnit'"
+        (change)="chooseFrequency(frequency.value)"
+        #frequency
+      >
         <option value="" [selected]="!units().frequencyUnit">as in the file</option>
         @for (unit of frequencyUnits; track unit) {
           <option [value]="unit" [selected]="unit === units().frequencyUnit">{{ unit }}</option>
@@ -19,7 +25,12 @@ import type { Units } from './draft-file';
     </div>
     <div class="field">
       <label for="level-unit-of-{{ fileId() }}">Levels in</label>
-      <select id="level-unit-of-{{ fileId() }}" (change)="chooseLevel(level.value)" #level>
+      <select
+        id="level-unit-of-{{ fileId() }}"
+        [class.needed]="needs() === 'levelUnit'"
+        (change)="chooseLevel(level.value)"
+        #level
+      >
         <option value="" [selected]="!units().levelUnit">as in the file</option>
         @for (unit of levelUnits; track unit.key) {
           <option [value]="unit.key" [selected]="unit.key === units().levelUnit">{{ unit.words }}</option>
@@ -32,6 +43,8 @@ import type { Units } from './draft-file';
 export class UnitsAsked {
   readonly fileId = input.required<number>();
   readonly units = input.required<Units>();
+  /** The unit without which the file cannot be read. */
+  readonly needs = input<Problem['needs']>();
   readonly chosen = output<Units>();
 
   protected readonly frequencyUnits = FREQUENCY_UNITS;
