@@ -20,9 +20,6 @@ import { ProblemBanner } from '../ui/problem-banner';
     .form {
       max-width: 760px;
     }
-    .form-row {
-      align-items: start;
-    }
   `,
 })
 export class BenchForm {

@@ -59,9 +59,6 @@ import { InstallationStore } from './installation-store';
       gap: 12px;
       max-width: 900px;
     }
-    .form-row {
-      align-items: start;
-    }
   `,
 })
 export class TeamForm {
