@@ -4,12 +4,12 @@ import { namedLines } from './named-lines';
 
 // JSON of the interface has plain arrays.
 const sets = JSON.parse(JSON.stringify([CISPR32_B, CISPR32_A])) as LimitSetView[];
-const namesAt = (rightEndHz: number) => namedLines(sets, rightEndHz).map(({ name }) => name);
+const writtenAt = (rightEndHz: number) => namedLines(sets, rightEndHz).map(({ written }) => written);
 
 describe('namedLines', () => {
   it('writes one name where two lines lie on each other: class B QP and class A AV, 60 dBuV above 5 MHz', () => {
     // CISPR 32 tables A.9 and A.10.
-    expect(namesAt(30e6)).toEqual([
+    expect(writtenAt(30e6)).toEqual([
       'CISPR 32 class B, QP and CISPR 32 class A, AV',
       'CISPR 32 class B, AV',
       'CISPR 32 class A, QP',
@@ -17,7 +17,16 @@ describe('namedLines', () => {
     ]);
   });
 
+  it('names each line by itself all the same', () => {
+    expect(namedLines(sets, 30e6).map(({ name }) => name)).toEqual([
+      'CISPR 32 class B, QP',
+      'CISPR 32 class B, AV',
+      'CISPR 32 class A, QP',
+      'CISPR 32 class A, AV',
+    ]);
+  });
+
   it('tells them apart where they part', () => {
-    expect(namesAt(2e6)).not.toContain('');
+    expect(writtenAt(2e6)).not.toContain('');
   });
 });

@@ -3,7 +3,7 @@ import { limitAt, type LimitLine } from '@shared/limits/limit-line';
 import type { SpectrumLimit } from '../ui/chart/spectrum-types';
 
 /**
- * The lines of sets with the names that are written at their right ends. Lines that lie on each other there share one
+ * The lines of sets with what is written at their right ends. Lines that lie on each other there share one
  * name, "CISPR 32 class A, AV and CISPR 32 class B, QP", where two would be written over each other.
  */
 export function namedLines(sets: readonly LimitSetView[], rightEndHz: number): SpectrumLimit[] {
@@ -14,10 +14,10 @@ export function namedLines(sets: readonly LimitSetView[], rightEndHz: number): S
       return { line, name: `${shortTitle(set)}, ${line.detector}`, place: `${endHz} ${limitAt(line, endHz)}` };
     }),
   );
-  return lines.map(({ line, place }, index) => {
+  return lines.map(({ line, name, place }, index) => {
     const together = lines.filter((other) => other.place === place);
     const isFirst = lines.findIndex((other) => other.place === place) === index;
-    return { line, name: isFirst ? together.map(({ name }) => name).join(' and ') : '' };
+    return { line, name, written: isFirst ? together.map((other) => other.name).join(' and ') : '' };
   });
 }
 

@@ -5,7 +5,7 @@ import type { SpectrumScene } from './spectrum-scene';
 import type { SpectrumLimit } from './spectrum-types';
 
 /** A limit line, heavy and neutral, with its name written on it. */
-export function limitSeries({ name, line }: SpectrumLimit, scene: SpectrumScene) {
+export function limitSeries({ name, written = name, line }: SpectrumLimit, scene: SpectrumScene) {
   const { levels, palette } = scene;
   const points = line.segments.flatMap(({ fromHz, toHz, fromDbuv, toDbuv }) => [
     [fromHz / 1e6, fromDbuv],
@@ -19,9 +19,9 @@ export function limitSeries({ name, line }: SpectrumLimit, scene: SpectrumScene)
     z: 6,
     lineStyle: { color: palette.limit, width: 2.4 },
   };
-  const place = namePlace(name, line, scene);
+  const place = namePlace(written, line, scene);
   if (!place || place.levelDbuv > levels.toDbuv) return [drawn];
-  const written = {
+  const label = {
     type: 'scatter',
     data: [[place.frequencyHz / 1e6, place.levelDbuv]],
     silent: true,
@@ -29,7 +29,7 @@ export function limitSeries({ name, line }: SpectrumLimit, scene: SpectrumScene)
     symbolSize: 0.1,
     label: {
       show: true,
-      formatter: name,
+      formatter: written,
       position: [-6, -6],
       align: 'right',
       verticalAlign: 'bottom',
@@ -41,7 +41,7 @@ export function limitSeries({ name, line }: SpectrumLimit, scene: SpectrumScene)
       textBorderWidth: 3,
     },
   };
-  return [drawn, written];
+  return [drawn, label];
 }
 
 /** Right end of the line in view, as high as the line is anywhere under its name. */

@@ -19,13 +19,13 @@ function trace(): SpectrumTrace {
   };
 }
 
-async function show(initialView: Partial<SpectrumView> = {}) {
+async function show(initialView: Partial<SpectrumView> = {}, traces = [trace()]) {
   TestBed.configureTestingModule({
     imports: [MatIconTestingModule],
     providers: [{ provide: CHART_ENGINE, useValue: neverLoads }],
   });
   const fixture = TestBed.createComponent(SpectrumChart);
-  fixture.componentRef.setInput('traces', [trace()]);
+  fixture.componentRef.setInput('traces', traces);
   fixture.componentRef.setInput(
     'limits',
     CISPR32_B.lines.map((line) => ({ name: line.detector, line })),
@@ -79,6 +79,22 @@ describe('SpectrumChart', () => {
     const { fixture, element } = await show({ pinsHz: [1e6] });
     element.querySelector<HTMLButtonElement>('app-spectrum-legend button')?.click();
     await fixture.whenStable();
-    expect(element.querySelector('app-spectrum-pins')?.textContent).not.toContain('58.0');
+    expect(element.textContent).not.toContain('58.0');
+  });
+
+  it('reads the limit lines where there is no trace, by cursor and as a table', async () => {
+    const { fixture, element, press } = await show({ fromHz: 900e3, toHz: 1.1e6, pinsHz: [1e6] }, []);
+    await press('ArrowRight');
+    const readout = element.querySelector('app-chart-readout')?.textContent?.replace(/\s+/g, ' ');
+    // CISPR 32 class B from 0.5 to 5 MHz: QP 56, AV 46 dBuV (table A.10).
+    expect(readout).toContain('QP 56.0');
+    expect(readout).toContain('AV 46.0');
+    expect(element.querySelector('.frame')?.getAttribute('aria-label')).toContain('Limit lines from 900 kHz');
+    expect(element.querySelector('app-spectrum-pins')).toBeNull();
+
+    const button = [...element.querySelectorAll('button')].find(({ textContent }) => textContent?.includes('Table'));
+    button?.click();
+    await fixture.whenStable();
+    expect(element.querySelector('app-chart-table-view')?.textContent).toContain('56.0');
   });
 });

@@ -1,16 +1,17 @@
 import { ChangeDetectionStrategy, Component, computed, input, linkedSignal, output, signal } from '@angular/core';
-import { formatDecibels } from '@shared/units/format-decibels';
 import { formatFrequency } from '@shared/units/format-frequency';
 import { ChartHost } from './chart-host';
 import { chartPalette } from './chart-palette';
 import type { Readout } from './chart-readout';
 import { fractionAt, FrequencyRange, frequencyAt, FULL_RANGE_HZ, rangeText } from './frequency-scale';
 import { levelRange } from './level-range';
+import { limitCsvRows, limitTable } from './limit-table';
 import { atFraction, PlotPoint, PlotRange } from './plot-margins';
 import { SpectrumLegend } from './spectrum-legend';
 import { spectrumMargins, spectrumOption } from './spectrum-option';
 import { SpectrumPins } from './spectrum-pins';
 import { readTrace, SpectrumReading } from './spectrum-reading';
+import { limitRows, traceRows } from './spectrum-readout';
 import { spectrumCsvRows, spectrumTable } from './spectrum-table';
 import type { SpectrumLimit, SpectrumMark, SpectrumTrace, SpectrumView } from './spectrum-types';
 import { type TraceLook, traceLooks } from './trace-look';
@@ -85,11 +86,19 @@ export class SpectrumChart {
     }),
   );
 
-  protected readonly table = computed(() => spectrumTable(this.shown(), this.limits(), this.view()));
-  protected readonly csvRows = () => spectrumCsvRows(this.shown(), this.limits(), this.view());
+  /** Without a trace to hold against them, the limit lines themselves are read. */
+  protected readonly readsLimits = computed(() => this.shown().length === 0 && this.limits().length > 0);
+  protected readonly table = computed(() =>
+    this.readsLimits()
+      ? limitTable(this.limits(), this.view())
+      : spectrumTable(this.shown(), this.limits(), this.view()),
+  );
+  protected readonly csvRows = () =>
+    this.readsLimits() ? limitCsvRows(this.limits()) : spectrumCsvRows(this.shown(), this.limits(), this.view());
   protected readonly ariaLabel = computed(
     () =>
-      `Spectrum of ${this.shown().length} sweeps from ${rangeText(this.view())}. ` +
+      `${this.readsLimits() ? 'Limit lines' : `Spectrum of ${this.shown().length} sweeps`} ` +
+      `from ${rangeText(this.view())}. ` +
       'Left and right move the cursor, Enter pins, plus and minus zoom, Escape shows the whole range.',
   );
 
@@ -103,17 +112,7 @@ export class SpectrumChart {
       yPx: atFraction(this.pointerY(), this.height(), top, bottom),
       title: formatFrequency(cursorHz),
       subtitle: this.marksNear(cursorHz),
-      columns: ['level dBµV', 'limit', 'margin'],
-      rows: this.readAt(cursorHz).map((reading) => ({
-        colour: this.colourOf(reading.trace),
-        label: reading.trace.label,
-        cells: [
-          reading.levelDbuv.toFixed(1),
-          reading.limitDbuv?.toFixed(1) ?? '',
-          reading.marginDb === null ? '' : formatDecibels(reading.marginDb),
-        ],
-        isOver: reading.marginDb !== null && reading.marginDb < 0,
-      })),
+      ...(this.readsLimits() ? limitRows(this.limits(), cursorHz) : traceRows(this.readAt(cursorHz), this.colourOf)),
     };
   });
 

@@ -18,8 +18,10 @@ export interface SpectrumTrace {
 }
 
 export interface SpectrumLimit {
-  /** Written on the line: "CISPR 32 class B, QP". */
+  /** "CISPR 32 class B, QP" */
   name: string;
+  /** What is written on the line where that is not its name: the names of all lines that lie on each other, or nothing. */
+  written?: string;
   line: LimitLine;
 }
 
