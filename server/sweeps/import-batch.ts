@@ -6,6 +6,7 @@ import type { Context } from '../context';
 import { isStorageFault } from '../db/is-storage-fault';
 import { withTransaction } from '../db/with-transaction';
 import { problemOf } from '../http/problem-of';
+import { requestJudging } from '../judging/request-judging';
 import type { HeldRun } from '../queue/held-run';
 import { ServiceError } from '../service-error';
 import { teamById } from '../teams/find-team';
@@ -15,6 +16,7 @@ import {
   finishBatch,
   type ImportBatch,
   type ImportItem,
+  listImportedProducts,
   listWaitingItems,
   settleItem,
 } from './import-store';
@@ -37,6 +39,10 @@ export async function importBatch(context: Context, held: HeldRun): Promise<void
     await setImmediate();
   }
   finishBatch(context.db, batchId, context.now());
+  // The set is complete now; sweeps that a bench sends one by one wait for the job's clock instead.
+  for (const product of listImportedProducts(context.db, batchId)) {
+    requestJudging(context, { kind: 'job', name: 'import' }, product, 'import');
+  }
 }
 
 type Outcome = 'imported' | 'duplicate' | 'refused' | 'taken';

@@ -112,3 +112,12 @@ export function listItemResults(db: Database, batchId: number): ItemResult[] {
     .orderBy(asc(importItems.id))
     .all();
 }
+
+/** Products that a batch brought sweeps to. */
+export function listImportedProducts(db: Database, batchId: number): { id: number; teamId: number }[] {
+  return db
+    .selectDistinct({ id: sweeps.productId, teamId: sweeps.teamId })
+    .from(sweeps)
+    .where(eq(sweeps.batchId, batchId))
+    .all();
+}

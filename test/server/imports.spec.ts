@@ -172,6 +172,12 @@ describe('a batch of files', () => {
     expect(stored.every(({ importedById, batchId }) => importedById === personId && batchId === body.id)).toBe(true);
     const list = (await visitor.get('/api/teams/chargers/imports').expect(200)).body as ImportBatchView[];
     expect(list).toMatchObject([{ id: body.id, imported: 2, items: [] }]);
+    const judging = context.db
+      .select()
+      .from(jobRuns)
+      .all()
+      .filter(({ job }) => job === 'judge');
+    expect(judging).toMatchObject([{ status: 'waiting', trigger: 'import', payload: { productId: product.id } }]);
   });
 
   it('is refused whole when its tags are not complete, naming the item', async () => {
