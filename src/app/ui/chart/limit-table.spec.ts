@@ -9,7 +9,7 @@ const limits = CISPR32_B.lines.map((line) => ({ name: `class B, ${line.detector}
 describe('limitTable', () => {
   it('reads every line at round frequencies, at its breaks and at the ends of the view', () => {
     const { columns, rows } = limitTable(limits, FULL_RANGE_HZ);
-    expect(columns.map(({ label }) => label)).toEqual(['Frequency', 'class B, QP, dBµV', 'class B, AV, dBµV']);
+    expect(columns.map(({ label }) => label)).toEqual(['dBµV at', 'class B, QP', 'class B, AV']);
     const at = (frequency: string) => rows.filter(([first]) => first === frequency);
     expect(at('150 kHz')).toEqual([['150 kHz', '66.0', '56.0']]);
     expect(at('300 kHz')).toEqual([['300 kHz', '60.2', '50.2']]);

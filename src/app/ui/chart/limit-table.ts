@@ -14,10 +14,10 @@ export function limitTable(limits: readonly SpectrumLimit[], view: FrequencyRang
   const breaksHz = limits.flatMap(({ line }) => line.segments.flatMap(({ fromHz, toHz }) => [fromHz, toHz]));
   const placesHz = new Set([view.fromHz, ...frequencyTicksHz(view), ...breaksHz, view.toHz]);
   return {
-    caption: `Limits from ${rangeText(view)}; where two segments meet, the lower limit applies`,
+    caption: `Limits in dBµV from ${rangeText(view)}; where two segments meet, the lower limit applies`,
     columns: [
-      { label: 'Frequency', isNumber: true },
-      ...limits.map(({ name }) => ({ label: `${name}, dBµV`, isNumber: true })),
+      { label: 'dBµV at', isNumber: true },
+      ...limits.map(({ name }) => ({ label: name, isNumber: true })),
     ],
     rows: [...placesHz]
       .filter((placeHz) => placeHz >= view.fromHz && placeHz <= view.toHz)
