@@ -15,10 +15,7 @@ export function limitTable(limits: readonly SpectrumLimit[], view: FrequencyRang
   const placesHz = new Set([view.fromHz, ...frequencyTicksHz(view), ...breaksHz, view.toHz]);
   return {
     caption: `Limits in dBµV from ${rangeText(view)}; where two segments meet, the lower limit applies`,
-    columns: [
-      { label: 'dBµV at', isNumber: true },
-      ...limits.map(({ name }) => ({ label: name, isNumber: true })),
-    ],
+    columns: [{ label: 'dBµV at', isNumber: true }, ...limits.map(({ name }) => ({ label: name, isNumber: true }))],
     rows: [...placesHz]
       .filter((placeHz) => placeHz >= view.fromHz && placeHz <= view.toHz)
       .sort((a, b) => a - b)
