@@ -1,7 +1,7 @@
 import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import type { Browser } from 'playwright-core';
+import type { Browser, Locator } from 'playwright-core';
 import { simulateDemoFiles } from '../../server/demo/simulate-demo-files';
 import { launchBrowser } from '../support/launch-browser';
 import { RunningInstallation } from '../support/running-installation';
@@ -80,7 +80,7 @@ describe('the main job, by page', () => {
     const sentence = /Firmware 1\.1\.0 lost \d+\.\d dB on [LN] at 15[78](\.\d)? kHz/;
     await expectSoon(async () => {
       await visit.page.reload();
-      return visit.page.getByText(sentence).first().isVisible();
+      return isShown(visit.page.getByText(sentence));
     });
   });
 
@@ -113,7 +113,7 @@ describe('the main job, by page', () => {
     await expectSoon(async () => {
       await visit.open('/mailbox');
       await visit.page.getByRole('heading', { name: 'Mailbox' }).waitFor();
-      return visit.page.getByRole('link', { name: /Charging: \d+ new drop.*runa/ }).isVisible();
+      return isShown(visit.page.getByRole('link', { name: /Charging: \d+ new drop.*runa/ }));
     });
     await visit.page.getByRole('link', { name: /Charging: \d+ new drop.*runa/ }).click();
     const letter = visit.page.frameLocator('iframe');
@@ -145,14 +145,16 @@ describe('the main job, by page', () => {
   it('somebody of another team finds nothing there', async () => {
     await visit.signIn('stranger');
     await visit.open('/t/charging/drops');
-    await expectSoon(
-      async () =>
-        !(await visit.page
-          .getByText(/Firmware 1\.1\.0 lost/)
-          .first()
-          .isVisible()),
+    await visit.page.locator('h1').first().waitFor();
+    expect(await isShown(visit.page.getByText(/Firmware 1\.1\.0 lost|Heronsway/))).toBe(false);
+    const answers = await visit.page.evaluate(() =>
+      Promise.all(
+        ['/api/teams/charging/drops', '/api/v1/products/adapter-45', '/api/v1/drops/1', '/api/v1/sweeps/1/file'].map(
+          async (path) => (await fetch(path)).status,
+        ),
+      ),
     );
-    expect(await visit.page.getByText('Heronsway').count()).toBe(0);
+    expect(answers).toEqual([404, 404, 404, 404]);
   });
 });
 
@@ -244,4 +246,15 @@ async function expectSoon(isSo: () => Promise<boolean>): Promise<void> {
     if (Date.now() > deadline) throw new Error('it did not come to that within a minute');
     await new Promise((resolve) => setTimeout(resolve, 300));
   }
+}
+
+/** Whether it shows within the time a page takes to load. */
+async function isShown(what: Locator): Promise<boolean> {
+  return what
+    .first()
+    .waitFor({ timeout: 2000 })
+    .then(
+      () => true,
+      () => false,
+    );
 }
