@@ -149,9 +149,12 @@ describe('the main job, by page', () => {
     expect(await isShown(visit.page.getByText(/Firmware 1\.1\.0 lost|Heronsway/))).toBe(false);
     const answers = await visit.page.evaluate(() =>
       Promise.all(
-        ['/api/teams/charging/drops', '/api/v1/products/adapter-45', '/api/v1/drops/1', '/api/v1/sweeps/1/file'].map(
-          async (path) => (await fetch(path)).status,
-        ),
+        [
+          '/api/teams/charging/drops',
+          '/api/v1/products/adapter-45',
+          '/api/v1/products/adapter-45/drops',
+          '/api/teams/charging/members',
+        ].map(async (path) => (await fetch(path)).status),
       ),
     );
     expect(answers).toEqual([404, 404, 404, 404]);
