@@ -39,6 +39,7 @@ export default {
     {
       ...onNode,
       displayName: 'server',
+      setupFiles: ['<rootDir>/test/support/seed-properties.ts'],
       testMatch: [
         '<rootDir>/{shared,server,jobs}/**/*.spec.ts',
         '<rootDir>/test/{server,jobs,architecture}/**/*.spec.ts',

@@ -24,7 +24,8 @@ describe('decimate', () => {
         if (frequencyHz < fromHz || frequencyHz > toHz) return;
         const column = columnOf(frequencyHz, columns);
         const [low, high] = found.get(column) ?? [Infinity, -Infinity];
-        found.set(column, [Math.min(low, levels[i]), Math.max(high, levels[i])]);
+        // Adding 0 makes one of the two zeros, which are the same level.
+        found.set(column, [Math.min(low, levels[i]) + 0, Math.max(high, levels[i]) + 0]);
       });
       return found;
     };
