@@ -1,4 +1,5 @@
 import type { Detector, Line } from '@shared/detectors/detectors';
+import { GUARD_CODES } from '@shared/judging/guard-hit';
 import type { Verdict } from '@shared/judging/verdict';
 import { and, asc, eq, gte, lt } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
@@ -53,6 +54,8 @@ export interface JudgedMargin {
   verdict: Verdict;
   marginDb: number | null;
   spreadDb: number | null;
+  /** A sign that the bench moved stood on the verdict. */
+  isBenchSuspected: boolean;
 }
 
 /** Every judged band of a product in build order. */
@@ -75,5 +78,9 @@ export function listJudgedMargins(db: Database, productId: number): JudgedMargin
     .where(eq(builds.productId, productId))
     .orderBy(asc(builds.position))
     .all()
-    .map(({ judgement, ...row }) => ({ ...row, spreadDb: judgement.spread?.sdDb ?? null }));
+    .map(({ judgement, ...row }) => ({
+      ...row,
+      spreadDb: judgement.spread?.sdDb ?? null,
+      isBenchSuspected: judgement.reasons.some(({ code }) => GUARD_CODES.some((guard) => guard === code)),
+    }));
 }

@@ -29,11 +29,15 @@ export function listCreep(context: Context, productId: number, targetMarginDb: n
 
 type Measured = JudgedMargin & { marginDb: number; spreadDb: number };
 
+/** The newest build's own verdict cuts nothing: a creep ends as a loss, and a step there is told from it by its shape. */
 function sinceLastChange(series: readonly JudgedMargin[]): Measured[] {
-  const changedAt = series.findLastIndex(({ verdict }) => verdict === 'lost' || verdict === 'gained');
-  return series
-    .slice(Math.max(changedAt, 0))
-    .filter((one): one is Measured => one.marginDb !== null && one.spreadDb !== null);
+  const changedAt = series.slice(0, -1).findLastIndex(({ verdict }) => verdict === 'lost' || verdict === 'gained');
+  return series.slice(Math.max(changedAt, 0)).filter(isMeasured);
+}
+
+/** A margin that the bench made says nothing of the product. */
+function isMeasured(one: JudgedMargin): one is Measured {
+  return one.marginDb !== null && one.spreadDb !== null && !one.isBenchSuspected;
 }
 
 function isLongEnough(series: readonly Measured[]): boolean {

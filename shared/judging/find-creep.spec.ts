@@ -38,6 +38,17 @@ describe('findCreep', () => {
     expect(findCreep(creeping, 10, 0.7, 6)?.buildsToTarget).toBe(0);
   });
 
+  it('leaves a step to the drops, and what a slope does not certainly lose to nobody', () => {
+    expect(findCreep(builds([10, 10.1, 9.9, 10, 10.1, 7, 7.1, 6.9, 7, 7.1, 7]), 10, 0.7, 4)).toBeNull();
+    expect(findCreep(builds([10, 6, 10, 6, 10, 6, 10, 6, 10, 6]), 10, 0.7, 4)).toBeNull();
+  });
+
+  it('is silent about less than 1 dB over the whole series, however certain', () => {
+    const barely = builds(Array.from({ length: 20 }, (_, index) => 10 - 0.04 * index));
+    expect(cusumLoss(barely, 10, 0.05)).not.toBeNull();
+    expect(findCreep(barely, 10, 0.05, 4)).toBeNull();
+  });
+
   it('finds nothing in a level series', () => {
     expect(findCreep(builds([10, 9.6, 10.4, 9.8, 10.1, 10.3, 9.7]), 10, 0.7, 4)).toBeNull();
   });
