@@ -6,6 +6,9 @@ import type { ProblemCode } from '@shared/contracts/problem';
 import { ServiceError } from '../service-error';
 import { contradictionOf } from './tag-contradiction';
 
+/** Ten times the finest usual scan; more would hold up everybody else for a second, and no receiver resolves it. */
+const MOST_POINTS = 300_000;
+
 export interface SweepReading {
   reading: DelimitedReading;
   trace: ReadTrace;
@@ -14,9 +17,21 @@ export interface SweepReading {
 /**
  * Reads an instrument's file.
  *
- * @throws ServiceError `unreadable` with line and column; `contradiction` when only the units given with it are at fault
+ * @throws ServiceError `unreadable` with line and column; `contradiction` when only the units given with it are at fault;
+ *   `tooLarge` for more points than any scan has
  */
 export function readFile(bytes: Uint8Array, units: DelimitedOptions): DelimitedReading {
+  const reading = readOrExplain(bytes, units);
+  const points = reading.frequenciesHz.length;
+  if (points > MOST_POINTS) {
+    throw new ServiceError('tooLarge', `the file holds ${points} points; at most ${MOST_POINTS} are read`, {
+      advice: 'Export the scan on a coarser grid; half the bandwidth is the step the standard asks for.',
+    });
+  }
+  return reading;
+}
+
+function readOrExplain(bytes: Uint8Array, units: DelimitedOptions): DelimitedReading {
   try {
     return readDelimited(bytes, units);
   } catch (error) {

@@ -49,6 +49,12 @@ async function refuses(sent: Test, status: number): Promise<Record<string, unkno
 }
 
 describe('POST /api/v1/sweeps', () => {
+  it('refuses more points than any scan has, saying how many', async () => {
+    const rows = Array.from({ length: 300_001 }, (_, i) => `${150_000 + i * 99};${40 + (i % 7)}`);
+    const { body } = await send(tags(), Buffer.from(`Frequency [Hz];Level [dBuV]\n${rows.join('\n')}\n`)).expect(413);
+    expect(body.detail).toBe('the file holds 300001 points; at most 300000 are read');
+  });
+
   it('answers 201 with the sweep, its build, worst margins and remarks', async () => {
     const file = buildSweepFile({ peaks: [[5_001_000, 50]] });
     const { body, headers } = await send(tags(), file).expect(201);
