@@ -1,7 +1,8 @@
-import { and, asc, count, eq, max, sql } from 'drizzle-orm';
+import type { JudgedSpread } from '@shared/judging/band-judgement';
+import { and, asc, count, desc, eq, isNotNull, max, sql } from 'drizzle-orm';
 import type { Database } from '../db/open-database';
 import { prepared } from '../db/prepared';
-import { benches, sweeps } from '../db/schema';
+import { benches, builds, firmwareRevisions, hardwareRevisions, products, sweeps, verdicts } from '../db/schema';
 
 export type Bench = typeof benches.$inferSelect;
 export type BenchChange = Partial<Omit<typeof benches.$inferInsert, 'id' | 'teamId' | 'key' | 'createdAt'>>;
@@ -43,4 +44,39 @@ export function benchUse(db: Database, benchId: number): BenchUse {
     .where(eq(sweeps.benchId, benchId))
     .get();
   return use ?? { sweepCount: 0, lastSweepAt: null };
+}
+
+export interface BuildSpread {
+  product: string;
+  hardware: string;
+  firmware: string;
+  spread: JudgedSpread;
+}
+
+/** The spreads that the judgement used for the last judged build measured on a bench. */
+export function listLastSpreads(db: Database, benchId: number): BuildSpread[] {
+  const last = db
+    .select({ buildId: sweeps.buildId })
+    .from(sweeps)
+    .innerJoin(builds, eq(builds.id, sweeps.buildId))
+    .where(and(eq(sweeps.benchId, benchId), eq(sweeps.kind, 'product'), isNotNull(builds.judgedAt)))
+    .orderBy(desc(sweeps.takenAt))
+    .limit(1)
+    .get();
+  if (last === undefined) return [];
+  return db
+    .select({
+      product: products.key,
+      hardware: hardwareRevisions.name,
+      firmware: firmwareRevisions.name,
+      judgement: verdicts.judgement,
+    })
+    .from(verdicts)
+    .innerJoin(builds, eq(builds.id, verdicts.buildId))
+    .innerJoin(products, eq(products.id, builds.productId))
+    .innerJoin(hardwareRevisions, eq(hardwareRevisions.id, builds.hardwareId))
+    .innerJoin(firmwareRevisions, eq(firmwareRevisions.id, builds.firmwareId))
+    .where(eq(verdicts.buildId, last.buildId))
+    .all()
+    .flatMap(({ judgement, ...build }) => (judgement.spread === null ? [] : [{ ...build, spread: judgement.spread }]));
 }

@@ -1,8 +1,11 @@
+import type { BenchView } from '@shared/contracts/benches';
 import { LIMIT_SETS } from '@shared/limits/limit-sets';
+import { eq } from 'drizzle-orm';
 import type { Express } from 'express';
 import request from 'supertest';
 import { createApp } from '../../server/app';
-import { auditEntries } from '../../server/db/schema';
+import { auditEntries, verdicts } from '../../server/db/schema';
+import { judgeProductNow } from '../../server/judging/judge-stale-builds';
 import { buildSweep } from '../builders/sweep-builder';
 import { buildBench, buildProduct, buildTeam } from '../builders/team-builder';
 import { signInAs } from '../support/sign-in';
@@ -54,6 +57,24 @@ describe('benches', () => {
         spread: { sdDb: 0.7, degreesOfFreedom: 4, source: "planning value, not yet this bench's own" },
       },
     ]);
+  });
+
+  it('show the spread that the last judgement used, with where it comes from', async () => {
+    const { visitor } = await signInAs(context, app, { teamId, role: 'viewer' });
+    const bench = buildBench(context, teamId, { key: 'bench-1' });
+    const product = buildProduct(context, teamId, { key: 'psu-240' });
+    for (const day of [1, 2, 3, 4, 5, 6]) {
+      const tags = { firmware: `1.${day}`, takenAt: `2026-03-0${day}T08:00:00Z` };
+      buildSweep(context, product, bench, tags, { peaks: [[159_000, 50 + (day % 2)]] });
+    }
+    judgeProductNow(context, product.id);
+    const { body } = await visitor.get('/api/teams/chargers/benches').expect(200);
+    const { spread } = (body as BenchView[])[0] ?? {};
+    expect(spread?.source).toMatch(
+      /^from runs between which nothing changed .*; the widest band of psu-240 C1 \/ 1\.6, as judged$/,
+    );
+    const used = context.db.select().from(verdicts).where(eq(verdicts.buildId, 6)).all();
+    expect(spread?.sdDb).toBe(Math.max(...used.map(({ judgement }) => judgement.spread?.sdDb ?? 0)));
   });
 
   it('are closed to viewers and unknown to other teams', async () => {

@@ -122,6 +122,6 @@ export class BenchCard {
   });
   protected readonly spread = computed(() => {
     const { sdDb, degreesOfFreedom } = this.bench().spread;
-    return `${formatDecibels(sdDb)} standard deviation of runs, ${degreesOfFreedom} degrees of freedom`;
+    return `${formatDecibels(sdDb)} standard deviation of runs, ${Math.round(degreesOfFreedom)} degrees of freedom`;
   });
 }
