@@ -3,6 +3,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import type { Browser, Locator } from 'playwright-core';
 import { simulateDemoFiles } from '../../server/demo/simulate-demo-files';
+import { LEASE_MS } from '../../server/queue/claim-run';
 import { launchBrowser } from '../support/launch-browser';
 import { RunningInstallation } from '../support/running-installation';
 import { ImportPage } from './pages/import-page';
@@ -220,7 +221,8 @@ describe('the main job, by interface', () => {
     await visit.page.waitForURL(/\/import\/\d+/);
     await installation.restartHard();
     await visit.page.reload();
-    await visit.page.getByText(/^Finished/).waitFor();
+    // A run that its worker held is given to another only when the lease is over.
+    await visit.page.getByText(/^Finished/).waitFor({ timeout: LEASE_MS + 30_000 });
     await visit.page.getByRole('link', { name: 'Open the build' }).click();
     await visit.page.getByRole('heading', { name: 'A3 / 1.1.1' }).waitFor();
     const builds = (await visit.page.evaluate(async () =>
