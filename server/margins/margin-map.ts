@@ -1,5 +1,6 @@
 import type { MarginMapView } from '@shared/contracts/margins';
 import { CELL_COUNT, CELL_NOT_MEASURED, cellEdgesHz } from '@shared/limits/cells';
+import { centiDbToDb } from '@shared/units/centi-decibels';
 import { listBuilds } from '../builds/list-builds';
 import type { Context } from '../context';
 import { isoTime } from '../iso-time';
@@ -32,7 +33,7 @@ function marginsOf(row: BuildCellsRow | undefined, choice: SeriesChoice): (numbe
   if (row === undefined) return new Array<null>(CELL_COUNT).fill(null);
   const isAll = choice.stateId === undefined && choice.line === undefined && choice.detector === undefined;
   const cells = isAll ? int16(row.cells) : leastOf(int16(row.tile), row.series, choice);
-  return Array.from(cells, (centiDb) => (centiDb === CELL_NOT_MEASURED ? null : centiDb / 100));
+  return Array.from(cells, (centiDb) => (centiDb === CELL_NOT_MEASURED ? null : centiDbToDb(centiDb)));
 }
 
 /** Least margin of every cell over the chosen series of a tile. */

@@ -1,5 +1,6 @@
 import type { Detector } from '@shared/detectors/detectors';
 import { CELL_NOT_MEASURED } from '@shared/limits/cells';
+import { centiDbToDb } from '@shared/units/centi-decibels';
 import { formatDecibels } from '@shared/units/format-decibels';
 import type { GuardHit } from './guard-hit';
 
@@ -36,8 +37,8 @@ function compare(higher: DetectorCells, lower: DetectorCells, toleranceDb: numbe
   for (let cell = 0; cell < higher.cells.length; cell++) {
     if (higher.cells[cell] === CELL_NOT_MEASURED || lower.cells[cell] === CELL_NOT_MEASURED) continue;
     comparedCells++;
-    const higherDbuv = higher.limitsDbuv[cell] - higher.cells[cell] / 100;
-    const lowerDbuv = lower.limitsDbuv[cell] - lower.cells[cell] / 100;
+    const higherDbuv = higher.limitsDbuv[cell] - centiDbToDb(higher.cells[cell]);
+    const lowerDbuv = lower.limitsDbuv[cell] - centiDbToDb(lower.cells[cell]);
     const excessDb = lowerDbuv - higherDbuv;
     if (excessDb <= toleranceDb) continue;
     cells.push(cell);

@@ -1,4 +1,5 @@
 import { CELL_NOT_MEASURED } from '@shared/limits/cells';
+import { centiDbToDb } from '@shared/units/centi-decibels';
 import { formatDecibels, formatSignedDecibels } from '@shared/units/format-decibels';
 import { median } from 'simple-statistics';
 import type { GuardHit } from './guard-hit';
@@ -41,7 +42,9 @@ export function findConstantOffset(buildCells: Int16Array, referenceCells: Int16
   const differencesDb: number[] = [];
   buildCells.forEach((build, cell) => {
     const reference = referenceCells[cell];
-    if (build !== CELL_NOT_MEASURED && reference !== CELL_NOT_MEASURED) differencesDb.push((build - reference) / 100);
+    if (build !== CELL_NOT_MEASURED && reference !== CELL_NOT_MEASURED) {
+      differencesDb.push(centiDbToDb(build - reference));
+    }
   });
   if (differencesDb.length < LEAST_CELLS) return null;
   const medianDb = median(differencesDb);
